@@ -1,0 +1,153 @@
+package org.evendraft.geometry;
+
+import java.util.List;
+import java.util.Optional;
+
+/** A closed body with the integrals that never change: the whole volume, its first moments, its bounds. Immutable. */
+public final class Solid {
+    private final Mesh mesh;
+    private final Optional<Extrusion> extrusion;
+    private final double volume;
+    private final Vec3 moment;
+    private final Vec3 least;
+    private final Vec3 greatest;
+
+    private Solid(Mesh mesh, Optional<Extrusion> extrusion) {
+        this.mesh = mesh;
+        this.extrusion = extrusion;
+        double[] xyz = mesh.rawCoordinates();
+        double[] lo = {Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY};
+        double[] hi = {Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY};
+        for (int i = 0; i < xyz.length; i++) {
+            lo[i % 3] = Math.min(lo[i % 3], xyz[i]);
+            hi[i % 3] = Math.max(hi[i % 3], xyz[i]);
+        }
+        this.least = new Vec3(lo[0], lo[1], lo[2]);
+        this.greatest = new Vec3(hi[0], hi[1], hi[2]);
+        Cut whole = new Cut(Plane.ofSlopes(hi[2], 0, 0));
+        whole.addMesh(1, mesh);
+        this.volume = whole.volume();
+        this.moment = whole.moment();
+    }
+
+    /** The body bounded by a mesh. */
+    public static Solid ofMesh(Mesh mesh) {
+        return new Solid(mesh, Optional.empty());
+    }
+
+    /** A box between two opposite corners, its edges along the axes (m). */
+    public static Solid box(Vec3 min, Vec3 max) {
+        return prism(
+                Axis.Z,
+                min.z(),
+                max.z(),
+                List.of(
+                        new double[] {min.x(), min.y()},
+                        new double[] {max.x(), min.y()},
+                        new double[] {max.x(), max.y()},
+                        new double[] {min.x(), max.y()}),
+                0);
+    }
+
+    /**
+     * An outline extruded along an axis.
+     *
+     * @param from first end on the axis (m)
+     * @param to other end, greater than from (m)
+     * @param outline the other two coordinates of each corner in the order (x, y), (y, z) or (x, z), in either sense (m)
+     * @param cornerRadius radius of every corner (m), 0 for sharp ones
+     * @throws IllegalArgumentException when the radius does not fit the edges
+     */
+    public static Solid prism(Axis axis, double from, double to, List<double[]> outline, double cornerRadius) {
+        Outline shape = cornerRadius > 0 ? Outline.rounded(outline, cornerRadius) : Outline.polygon(outline);
+        Vec3 first = axis.first();
+        Vec3 second = axis.second();
+        Vec3 along = first.cross(second);
+        double startAt = along.dot(axis.direction()) > 0 ? from : to;
+        Vec3 start = axis.direction()
+                .times(startAt)
+                .plus(first.times(shape.centroidP()))
+                .plus(second.times(shape.centroidQ()));
+        return extruded(shape, start, first, second, along, to - from);
+    }
+
+    /**
+     * A cylinder, or a frustum of a cone when its diameters differ; an end diameter of 0 makes a cone.
+     *
+     * @param start centre of the first end (m)
+     * @param end centre of the other end (m)
+     * @param diameter at the start (m)
+     * @param endDiameter at the end (m)
+     */
+    public static Solid cylinder(Vec3 start, Vec3 end, double diameter, double endDiameter) {
+        Vec3 axis = end.minus(start).unit();
+        Vec3 aside = Math.abs(axis.z()) < 0.9 ? new Vec3(0, 0, 1) : new Vec3(1, 0, 0);
+        Vec3 p = aside.cross(axis).unit();
+        Vec3 q = axis.cross(p);
+        Outline unit = Outline.circle(0.5);
+        if (diameter == endDiameter) {
+            return extruded(
+                    Outline.circle(diameter / 2),
+                    start,
+                    p,
+                    q,
+                    axis,
+                    end.minus(start).norm());
+        }
+        return ofMesh(Loft.between(unit, start, diameter, end, endDiameter, p, q));
+    }
+
+    private static Solid extruded(Outline outline, Vec3 start, Vec3 p, Vec3 q, Vec3 axis, double length) {
+        Mesh mesh = Loft.between(outline, start, 1, start.plus(axis.times(length)), 1, p, q);
+        return new Solid(mesh, Optional.of(new Extrusion(outline, start, p, q, axis, length)));
+    }
+
+    /** The surface as triangles. */
+    public Mesh mesh() {
+        return mesh;
+    }
+
+    /** Whole volume (m³); negative when the normals point inward. */
+    public double volume() {
+        return volume;
+    }
+
+    /** Centroid of the whole (m). */
+    public Vec3 centroid() {
+        return moment.times(1 / volume);
+    }
+
+    /** The corner of the bounding box with the least coordinates (m). */
+    public Vec3 least() {
+        return least;
+    }
+
+    /** The corner of the bounding box with the greatest coordinates (m). */
+    public Vec3 greatest() {
+        return greatest;
+    }
+
+    /** Adds the integrals of what lies under the cut's plane, times the sign (−1 for a cut-out), by the cheapest exact way. */
+    public void addBelow(Cut cut, double sign) {
+        Plane plane = cut.plane();
+        Vec3 n = plane.normal();
+        double middle = plane.height(least.plus(greatest).times(0.5));
+        double reach = (Math.abs(n.x()) * (greatest.x() - least.x())
+                        + Math.abs(n.y()) * (greatest.y() - least.y())
+                        + Math.abs(n.z()) * (greatest.z() - least.z()))
+                / 2;
+        if (middle - reach > 0) {
+            return;
+        }
+        if (middle + reach <= 0) {
+            cut.addWhole(sign, volume, moment);
+        } else if (extrusion.isEmpty() || !extrusion.get().addBelow(cut, sign)) {
+            cut.addMesh(sign, mesh);
+        }
+    }
+
+    /** The same integrals by clipping every triangle, with no short cut: the plain method that the fast one must equal. */
+    public void addBelowByTriangles(Cut cut, double sign) {
+        cut.addMesh(sign, mesh);
+    }
+}

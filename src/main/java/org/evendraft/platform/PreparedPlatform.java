@@ -1,0 +1,60 @@
+package org.evendraft.platform;
+
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.Collectors;
+import org.evendraft.geometry.Assembly;
+
+/** A checked platform with what is computed once from it: the hull's assembly and each tank's calibration. Immutable. */
+public final class PreparedPlatform {
+    private final Platform platform;
+    private final Assembly hull;
+    private final Map<String, Calibration> calibrations;
+
+    /** Prepares a platform that has been checked. */
+    public PreparedPlatform(Platform platform) {
+        this.platform = platform;
+        this.hull = assembly(platform.hull());
+        this.calibrations =
+                platform.tanks().stream().collect(Collectors.toUnmodifiableMap(Tank::id, PreparedPlatform::calibrate));
+    }
+
+    /** Bodies put together. */
+    static Assembly assembly(List<Body> bodies) {
+        return new Assembly(bodies.stream()
+                .map(body -> new Assembly.Part(body.solid(), body.cutOut()))
+                .toList());
+    }
+
+    /** The calibration of a tank: by its table where it has one, else by its shape. */
+    static Calibration calibrate(Tank tank) {
+        Optional<ShapeCalibration> shape = tank.bodies().isEmpty()
+                ? Optional.empty()
+                : Optional.of(new ShapeCalibration(assembly(tank.bodies()), tank.permeability()));
+        return tank.table().isEmpty() ? shape.orElseThrow() : new TableCalibration(tank.table(), shape);
+    }
+
+    /** The platform. */
+    public Platform platform() {
+        return platform;
+    }
+
+    /** The hull. */
+    public Assembly hull() {
+        return hull;
+    }
+
+    /**
+     * The calibration of a tank.
+     *
+     * @throws IllegalArgumentException when there is no such tank
+     */
+    public Calibration calibration(String tank) {
+        Calibration calibration = calibrations.get(tank);
+        if (calibration == null) {
+            throw new IllegalArgumentException("no tank " + tank);
+        }
+        return calibration;
+    }
+}
