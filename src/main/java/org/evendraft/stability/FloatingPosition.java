@@ -1,0 +1,116 @@
+package org.evendraft.stability;
+
+import java.util.Comparator;
+import java.util.Optional;
+import java.util.stream.DoubleStream;
+import java.util.stream.IntStream;
+import java.util.stream.Stream;
+import org.evendraft.stability.Equilibrium.Afloat;
+
+/**
+ * The search for the position in which weight equals buoyancy and G lies over B, liquids free: the potential energy, G's height
+ * over B along the vertical at the displacement, is brought to a minimum over the two slopes by Newton's method with the analytic
+ * stiffness, in steps so short that the search stays in the valley where it starts.
+ */
+final class FloatingPosition {
+    /** Beyond this inclination a platform counts as capsized (rad). */
+    static final double GREATEST_INCLINATION = Math.toRadians(60);
+    /** G is brought this near to the vertical through B (m). */
+    static final double ARM_TOLERANCE = 1e-9;
+
+    private static final int MOST_STEPS = 200;
+    /** Longest step of the slopes, about 6°. */
+    private static final double LONGEST_STEP = 0.1;
+
+    private static final double SHORTEST_STEP = 1e-13;
+    /** Energies nearer than this are those of twins (m). */
+    private static final double SAME_ENERGY = 1e-8;
+    /** Slopes under this are none, when twins are compared. */
+    private static final double SAME_SLOPE = 1e-6;
+
+    private static final double[] RINGS = {2, 8, 20, 35, 50};
+    private static final int DIRECTIONS = 16;
+
+    private final LoadedPlatform platform;
+
+    FloatingPosition(LoadedPlatform platform) {
+        this.platform = platform;
+    }
+
+    Equilibrium find() {
+        Inclination start = Inclination.upright(platform);
+        if (platform.evenKeel().gm().least().corrected() > 0) {
+            return descend(start);
+        }
+        return starts().map(slopes -> descend(start.at(slopes[0], slopes[1])))
+                .flatMap(
+                        found -> found instanceof Afloat afloat && afloat.stable() ? Stream.of(afloat) : Stream.empty())
+                .reduce(FloatingPosition::better)
+                .map(Equilibrium.class::cast)
+                .orElseGet(Equilibrium.Capsizes::new);
+    }
+
+    /** Slopes all around, starboard first. */
+    private static Stream<double[]> starts() {
+        return DoubleStream.of(RINGS)
+                .boxed()
+                .flatMap(ring -> IntStream.range(0, DIRECTIONS).mapToObj(i -> {
+                    double slope = Math.tan(Math.toRadians(ring));
+                    double direction = 2 * Math.PI * i / DIRECTIONS;
+                    return new double[] {slope * Math.cos(direction), slope * Math.sin(direction)};
+                }));
+    }
+
+    /** The one of less energy; of twins the one with starboard, then bow, down. */
+    private static Afloat better(Afloat a, Afloat b) {
+        double difference = energy(a) - energy(b);
+        if (Math.abs(difference) > SAME_ENERGY) {
+            return difference < 0 ? a : b;
+        }
+        Comparator<Afloat> byHeel =
+                Comparator.comparingDouble(p -> rounded(p.waterplane().heelRad()));
+        Comparator<Afloat> order =
+                byHeel.thenComparingDouble(p -> rounded(p.waterplane().trimRad()));
+        return order.compare(a, b) >= 0 ? a : b;
+    }
+
+    private static double rounded(double angle) {
+        return Math.rint(angle / SAME_SLOPE) * SAME_SLOPE;
+    }
+
+    private static double energy(Afloat position) {
+        return position.centreOfGravity()
+                .minus(position.centreOfBuoyancy())
+                .dot(position.waterplane().plane().normal());
+    }
+
+    /** Downhill from a start. */
+    private Equilibrium descend(Inclination start) {
+        Inclination here = start;
+        double reach = LONGEST_STEP;
+        for (int i = 0; i < MOST_STEPS && reach > SHORTEST_STEP; i++) {
+            if (here.arm() <= ARM_TOLERANCE) {
+                Optional<double[]> downhill = here.wayOffSaddle();
+                if (downhill.isEmpty()) {
+                    return here.afloat(true);
+                }
+                here = here.moved(downhill.get()[0] * LONGEST_STEP / 2, downhill.get()[1] * LONGEST_STEP / 2);
+                continue;
+            }
+            double[] step = here.newtonStep(reach);
+            Inclination next = here.moved(step[0], step[1]);
+            if (next.energy() < here.energy() || next.arm() < here.arm() / 2) {
+                here = next;
+                reach = Math.min(LONGEST_STEP, 2 * reach);
+            } else {
+                reach = Math.hypot(step[0], step[1]) / 4;
+            }
+            if (here.inclination() > GREATEST_INCLINATION) {
+                return new Equilibrium.Capsizes();
+            }
+        }
+        return here.arm() <= ARM_TOLERANCE
+                ? here.afloat(here.wayOffSaddle().isEmpty())
+                : new Equilibrium.Unresolved(here.arm());
+    }
+}
