@@ -42,7 +42,7 @@ final class FloatingPosition {
         if (platform.evenKeel().gm().least().corrected() > 0) {
             return descend(start);
         }
-        return starts().map(slopes -> descend(start.at(slopes[0], slopes[1])))
+        return starts().map(slopes -> descend(start.at(slopes)))
                 .flatMap(
                         found -> found instanceof Afloat afloat && afloat.stable() ? Stream.of(afloat) : Stream.empty())
                 .reduce(FloatingPosition::better)
@@ -50,15 +50,14 @@ final class FloatingPosition {
                 .orElseGet(Equilibrium.Capsizes::new);
     }
 
-    /** Slopes all around, starboard first. */
-    private static Stream<double[]> starts() {
+    /** Slopes all around at several inclinations. */
+    private static Stream<Slopes> starts() {
         return DoubleStream.of(RINGS)
+                .map(ring -> Math.tan(Math.toRadians(ring)))
                 .boxed()
-                .flatMap(ring -> IntStream.range(0, DIRECTIONS).mapToObj(i -> {
-                    double slope = Math.tan(Math.toRadians(ring));
-                    double direction = 2 * Math.PI * i / DIRECTIONS;
-                    return new double[] {slope * Math.cos(direction), slope * Math.sin(direction)};
-                }));
+                .flatMap(slope -> IntStream.range(0, DIRECTIONS)
+                        .mapToDouble(i -> 2 * Math.PI * i / DIRECTIONS)
+                        .mapToObj(direction -> new Slopes(Math.cos(direction), Math.sin(direction)).times(slope)));
     }
 
     /** The one of less energy; of twins the one with starboard, then bow, down. */
@@ -85,32 +84,27 @@ final class FloatingPosition {
     }
 
     /** Downhill from a start. */
-    private Equilibrium descend(Inclination start) {
+    private static Equilibrium descend(Inclination start) {
         Inclination here = start;
         double reach = LONGEST_STEP;
         for (int i = 0; i < MOST_STEPS && reach > SHORTEST_STEP; i++) {
-            if (here.arm() <= ARM_TOLERANCE) {
-                Optional<double[]> downhill = here.wayOffSaddle();
-                if (downhill.isEmpty()) {
-                    return here.afloat(true);
-                }
-                here = here.moved(downhill.get()[0] * LONGEST_STEP / 2, downhill.get()[1] * LONGEST_STEP / 2);
-                continue;
-            }
-            double[] step = here.newtonStep(reach);
-            Inclination next = here.moved(step[0], step[1]);
-            if (next.energy() < here.energy() || next.arm() < here.arm() / 2) {
-                here = next;
-                reach = Math.min(LONGEST_STEP, 2 * reach);
-            } else {
-                reach = Math.hypot(step[0], step[1]) / 4;
-            }
-            if (here.inclination() > GREATEST_INCLINATION) {
+            if (here.slopes().inclination() > GREATEST_INCLINATION) {
                 return new Equilibrium.Capsizes();
             }
+            if (here.arm() <= ARM_TOLERANCE) {
+                Optional<Slopes> downhill = here.energy().wayOffSaddle();
+                if (downhill.isEmpty()) {
+                    return here.afloat();
+                }
+                here = here.moved(downhill.get().times(LONGEST_STEP / 2));
+            } else {
+                Slopes step = here.energy().newtonStep(reach);
+                Inclination next = here.moved(step);
+                boolean better = next.energy().value() < here.energy().value() || next.arm() < here.arm() / 2;
+                here = better ? next : here;
+                reach = better ? Math.min(LONGEST_STEP, 2 * reach) : step.norm() / 4;
+            }
         }
-        return here.arm() <= ARM_TOLERANCE
-                ? here.afloat(here.wayOffSaddle().isEmpty())
-                : new Equilibrium.Unresolved(here.arm());
+        return here.arm() <= ARM_TOLERANCE ? here.afloat() : new Equilibrium.Unresolved(here.arm());
     }
 }
