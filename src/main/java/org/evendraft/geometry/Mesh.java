@@ -65,6 +65,17 @@ public final class Mesh {
         return new Mesh(coordinates, flipped);
     }
 
+    /** The same triangles with vertices of the same coordinates made one, and vertices of no triangle left out. */
+    public Mesh tidied() {
+        Welder welder = new Welder(0);
+        int[] renumbered = new int[corners.length];
+        for (int i = 0; i < corners.length; i++) {
+            int k = 3 * corners[i];
+            renumbered[i] = welder.number(coordinates[k], coordinates[k + 1], coordinates[k + 2]);
+        }
+        return new Mesh(welder.coordinates(), renumbered);
+    }
+
     /** Coordinates for loops that cannot afford an object for each vertex; never written to. */
     double[] rawCoordinates() {
         return coordinates;

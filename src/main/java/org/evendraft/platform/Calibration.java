@@ -10,13 +10,16 @@ public sealed interface Calibration permits ShapeCalibration, TableCalibration {
     /** The full volume, permeability counted (m³). */
     double fullVolume();
 
+    /** The least level that the calibration knows (m): 0, or that of the table's first row. */
+    double leastLevel();
+
     /** The level of the full tank (m). */
     double fullLevel();
 
     /**
      * The volume at a level.
      *
-     * @param level level (m), from that of the empty to that of the full tank
+     * @param level level (m), from the least to that of the full tank
      * @throws IllegalArgumentException outside that
      */
     double volumeAt(double level);

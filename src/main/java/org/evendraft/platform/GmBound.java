@@ -8,4 +8,14 @@ import java.util.OptionalDouble;
  * @param transverse about the longitudinal axis (m)
  * @param longitudinal about the transverse axis (m)
  */
-public record GmBound(OptionalDouble transverse, OptionalDouble longitudinal) {}
+public record GmBound(OptionalDouble transverse, OptionalDouble longitudinal) {
+
+    /** Reads an object {@code {"transverse", "longitudinal"}}, each of which may be absent. */
+    public static GmBound read(Fields fields) {
+        GmBound bound = new GmBound(
+                fields.optionalNumber("transverse", Range.COORDINATE),
+                fields.optionalNumber("longitudinal", Range.COORDINATE));
+        fields.noOthers();
+        return bound;
+    }
+}

@@ -38,6 +38,11 @@ public final class ShapeCalibration implements Calibration {
     }
 
     @Override
+    public double leastLevel() {
+        return 0;
+    }
+
+    @Override
     public double fullLevel() {
         return shape.highest() - bottom;
     }

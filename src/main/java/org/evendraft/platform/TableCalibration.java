@@ -51,6 +51,11 @@ public final class TableCalibration implements Calibration {
     }
 
     @Override
+    public double leastLevel() {
+        return rows.get(0).level();
+    }
+
+    @Override
     public double fullLevel() {
         return rows.get(rows.size() - 1).level();
     }

@@ -1,0 +1,61 @@
+package org.evendraft.platform;
+
+import com.fasterxml.jackson.databind.JsonNode;
+import java.util.LinkedHashSet;
+import java.util.List;
+import java.util.Set;
+
+/** Reads a platform document, checks it as a whole, and prepares what is computed once from it. */
+public final class PlatformReader {
+    /** Sea water of the usual salinity (t/m³). */
+    private static final double DEFAULT_WATER_DENSITY = 1.025;
+
+    private PlatformReader() {}
+
+    /**
+     * Reads a platform.
+     *
+     * @param document the document, as {@link Json#parse} gives it
+     * @throws FaultyDocumentException with all faults
+     */
+    public static PreparedPlatform read(JsonNode document) {
+        Faults faults = new Faults();
+        Platform platform = platform(Fields.of(document, "", faults));
+        faults.throwIfAny();
+        return new PreparedPlatform(platform);
+    }
+
+    private static Platform platform(Fields fields) {
+        String id = Ids.checked(fields);
+        double water = fields.number("waterDensity", Range.DENSITY, DEFAULT_WATER_DENSITY);
+        Fields hull = fields.object("hull");
+        List<Body> bodies = BodyCheck.whole(BodyReader.read(hull.someObjects("bodies")), hull, "bodies");
+        hull.noOthers();
+        List<Fields> tankList = fields.objects("tanks");
+        List<Tank> tanks = TankReader.read(tankList, water);
+        Set<String> tankIds = new LinkedHashSet<>();
+        tanks.forEach(tank -> tankIds.add(tank.id()));
+        Platform platform = new Platform(
+                id,
+                fields.text("name", id),
+                water,
+                bodies,
+                DeckReader.draftMarks(fields.objects("draftMarks")),
+                lightship(fields.object("lightship")),
+                tanks,
+                PumpReader.read(fields.objects("pumps"), tankIds),
+                DeckReader.areas(fields.objects("deckAreas")),
+                DeckReader.windage(fields.objects("windage")),
+                DeckReader.openings(fields.objects("openings")),
+                ModeReader.read(fields.objects("modes")),
+                CompartmentReader.read(fields.objects("compartments")));
+        fields.noOthers();
+        return platform;
+    }
+
+    private static Lightship lightship(Fields fields) {
+        Lightship lightship = new Lightship(fields.number("mass", Range.POSITIVE), fields.position());
+        fields.noOthers();
+        return lightship;
+    }
+}
