@@ -17,9 +17,6 @@ import org.evendraft.platform.Tank;
  * @param moving whether a pump works on it: then it counts as slack whatever its level
  */
 record TankContents(Tank tank, Calibration calibration, double density, Liquid liquid, boolean moving) {
-    /** A tank under this part of full is empty. */
-    private static final double EMPTY_FRACTION = 1e-9;
-
     double mass() {
         return density * liquid.volume();
     }
@@ -29,11 +26,7 @@ record TankContents(Tank tank, Calibration calibration, double density, Liquid l
     }
 
     TankState state() {
-        double fraction = fraction();
-        if (fraction < EMPTY_FRACTION) {
-            return TankState.EMPTY;
-        }
-        return fraction >= tank.pressedUpFraction() ? TankState.PRESSED_UP : TankState.SLACK;
+        return TankState.of(fraction(), tank.pressedUpFraction());
     }
 
     boolean hasFreeSurface() {

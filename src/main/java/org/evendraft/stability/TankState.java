@@ -7,5 +7,21 @@ public enum TankState {
     /** Partly filled, with a free surface. */
     SLACK,
     /** At or over its pressed-up fraction: no free surface. */
-    PRESSED_UP
+    PRESSED_UP;
+
+    /** A tank under this part of full is empty. */
+    private static final double EMPTY_FRACTION = 1e-9;
+
+    /**
+     * The state of a tank at rest.
+     *
+     * @param fraction what it holds, as a part of its full volume
+     * @param pressedUpFraction the part from which it has no free surface
+     */
+    public static TankState of(double fraction, double pressedUpFraction) {
+        if (fraction < EMPTY_FRACTION) {
+            return EMPTY;
+        }
+        return fraction >= pressedUpFraction ? PRESSED_UP : SLACK;
+    }
 }

@@ -1,0 +1,23 @@
+package org.evendraft.http;
+
+import io.micrometer.prometheusmetrics.PrometheusMeterRegistry;
+import java.util.List;
+import java.util.stream.Stream;
+import org.evendraft.service.ControlRoom;
+
+/** All routes of the service. */
+final class Routes {
+    private Routes() {}
+
+    static List<Route> of(ControlRoom room, PrometheusMeterRegistry meters) {
+        Writes writes = new Writes(room.once());
+        return Stream.of(
+                        new ServiceRoutes(room.checkHealth(), meters).routes(),
+                        new PlatformRoutes(room, writes).routes(),
+                        new HydrostaticRoutes(room).routes(),
+                        new TankRoutes(room, writes).routes(),
+                        new ConditionRoutes(room, writes).routes())
+                .flatMap(List::stream)
+                .toList();
+    }
+}

@@ -1,0 +1,104 @@
+package org.evendraft.service;
+
+import java.time.Clock;
+import java.util.function.Supplier;
+import org.evendraft.store.ConditionRepository;
+import org.evendraft.store.Database;
+import org.evendraft.store.IdempotencyRepository;
+import org.evendraft.store.PlatformRepository;
+import org.evendraft.store.SoundingRepository;
+
+/** Everything that can be asked of the service, put together over a database. */
+public final class ControlRoom {
+    private final Once once;
+    private final StorePlatform storePlatform;
+    private final ReadPlatforms readPlatforms;
+    private final ReadHydrostatics readHydrostatics;
+    private final RecordSoundings recordSoundings;
+    private final ReadSoundings readSoundings;
+    private final ReadTankStates readTankStates;
+    private final EvaluateCondition evaluateCondition;
+    private final StoreCondition storeCondition;
+    private final ReadConditions readConditions;
+    private final CheckHealth checkHealth;
+
+    /**
+     * @param database where everything is kept
+     * @param clock tells the time
+     * @param ids makes ids, UUIDs
+     * @param engineVersion version of the program
+     */
+    public ControlRoom(Database database, Clock clock, Supplier<String> ids, String engineVersion) {
+        Provenance.Source source = new Provenance.Source(clock, engineVersion);
+        PlatformRepository platforms = new PlatformRepository(clock);
+        ConditionRepository conditions = new ConditionRepository(clock, ids);
+        SoundingRepository soundings = new SoundingRepository(clock, ids);
+        PlatformShelf shelf = new PlatformShelf(database, platforms);
+        this.once = new Once(database, new IdempotencyRepository(clock));
+        this.storePlatform = new StorePlatform(platforms);
+        this.readPlatforms = new ReadPlatforms(database, platforms, shelf);
+        this.readHydrostatics = new ReadHydrostatics(shelf, source);
+        this.recordSoundings = new RecordSoundings(shelf, soundings, clock);
+        this.readSoundings = new ReadSoundings(database, shelf, soundings);
+        this.readTankStates = new ReadTankStates(database, shelf, soundings, clock);
+        this.evaluateCondition = new EvaluateCondition(shelf, new LatestFills(readTankStates), source);
+        this.storeCondition = new StoreCondition(evaluateCondition, conditions);
+        this.readConditions = new ReadConditions(database, shelf, conditions);
+        this.checkHealth = new CheckHealth(database, engineVersion);
+    }
+
+    /** Carries writes out once. */
+    public Once once() {
+        return once;
+    }
+
+    /** Stores platforms. */
+    public StorePlatform storePlatform() {
+        return storePlatform;
+    }
+
+    /** Reads platforms. */
+    public ReadPlatforms readPlatforms() {
+        return readPlatforms;
+    }
+
+    /** Reads hydrostatics. */
+    public ReadHydrostatics readHydrostatics() {
+        return readHydrostatics;
+    }
+
+    /** Records soundings. */
+    public RecordSoundings recordSoundings() {
+        return recordSoundings;
+    }
+
+    /** Reads the history of soundings. */
+    public ReadSoundings readSoundings() {
+        return readSoundings;
+    }
+
+    /** Reads the tanks' states. */
+    public ReadTankStates readTankStates() {
+        return readTankStates;
+    }
+
+    /** Evaluates conditions. */
+    public EvaluateCondition evaluateCondition() {
+        return evaluateCondition;
+    }
+
+    /** Stores conditions. */
+    public StoreCondition storeCondition() {
+        return storeCondition;
+    }
+
+    /** Reads conditions. */
+    public ReadConditions readConditions() {
+        return readConditions;
+    }
+
+    /** Checks health. */
+    public CheckHealth checkHealth() {
+        return checkHealth;
+    }
+}
