@@ -1,5 +1,7 @@
 package org.evendraft.geometry;
 
+import java.util.List;
+
 /** The surface between two parallel outlines of one form, each cap a fan about its middle. */
 final class Loft {
     private Loft() {}
@@ -11,10 +13,11 @@ final class Loft {
      * @param q unit vector of its second; {@code p × q} points from start to end
      */
     static Mesh between(Outline outline, Vec3 start, double startScale, Vec3 end, double endScale, Vec3 p, Vec3 q) {
-        int n = outline.size();
+        List<double[]> points = outline.tessellated();
+        int n = points.size();
         double[] xyz = new double[3 * (2 * n + 2)];
         for (int i = 0; i < n; i++) {
-            Vec3 spoke = p.times(outline.p(i)).plus(q.times(outline.q(i)));
+            Vec3 spoke = p.times(points.get(i)[0]).plus(q.times(points.get(i)[1]));
             put(xyz, i, start.plus(spoke.times(startScale)));
             put(xyz, n + i, end.plus(spoke.times(endScale)));
         }

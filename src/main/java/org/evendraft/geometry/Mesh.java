@@ -55,6 +55,19 @@ public final class Mesh {
         return corners[3 * triangle + k];
     }
 
+    /** Least and greatest reach of the vertices along a direction from the origin (m). */
+    double[] span(Vec3 direction) {
+        double[] span = {Double.POSITIVE_INFINITY, Double.NEGATIVE_INFINITY};
+        for (int i = 0; i < coordinates.length; i += 3) {
+            double reach = direction.x() * coordinates[i]
+                    + direction.y() * coordinates[i + 1]
+                    + direction.z() * coordinates[i + 2];
+            span[0] = Math.min(span[0], reach);
+            span[1] = Math.max(span[1], reach);
+        }
+        return span;
+    }
+
     /** The same surface seen from the other side: every normal reversed. */
     public Mesh reversed() {
         int[] flipped = corners.clone();

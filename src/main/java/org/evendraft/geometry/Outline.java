@@ -1,161 +1,230 @@
 package org.evendraft.geometry;
 
 import java.util.ArrayList;
+import java.util.Collections;
 import java.util.List;
 
 /**
- * A closed plane polygon, anticlockwise, with the integrals of the area that it bounds. Curves are polygons whose area is that of
- * the curve and whose edges span at most {@link #STEP}.
+ * A closed plane outline of straight edges and arcs, anticlockwise about its centroid, which is the centre of its coordinates.
+ * Immutable.
  */
 final class Outline {
     /**
-     * Greatest angle that one edge of a tessellated curve spans (rad). The edges of an area-true polygon lie within ±r·STEP²/12 of
-     * the circle, so a cut along the axis of a lying cylinder has its breadth b within r²·STEP²/(3b) and its second moment (∝ b³)
-     * within r²·STEP²/b² of the true one: under 1e-4 for every cut broader than a fifth of the diameter, that is deeper than one
-     * hundredth of it.
+     * Greatest angle that one edge of a tessellated curve spans (rad). Only cones are integrated by their tessellation: its edges lie
+     * within ±r·STEP²/12 of the circle, so the breadth b of a section along the axis is within r²·STEP²/(3b) and its second moment
+     * (∝ b³) within r²·STEP²/b² of the true one: under 1e-4 where b is more than a fifth of the diameter.
      */
     static final double STEP = 2 * Math.PI / 1440;
 
     private static final double SAME_POINT = 1e-9;
 
-    private final double[] p;
-    private final double[] q;
-    private final double area;
+    private final List<Stretch> stretches;
     private final double centroidP;
     private final double centroidQ;
-    private final double spp;
-    private final double sqq;
-    private final double spq;
-    private final double radius;
+    private final AreaMoments whole;
 
-    private Outline(List<double[]> points) {
-        int n = points.size();
-        double twice = 0;
-        double mp = 0;
-        double mq = 0;
-        double p0 = points.get(0)[0];
-        double q0 = points.get(0)[1];
-        for (int i = 0; i < n; i++) {
-            double[] a = points.get(i);
-            double[] b = points.get((i + 1) % n);
-            double c = (a[0] - p0) * (b[1] - q0) - (b[0] - p0) * (a[1] - q0);
-            twice += c;
-            mp += c * (a[0] + b[0] - 2 * p0);
-            mq += c * (a[1] + b[1] - 2 * q0);
-        }
-        area = Math.abs(twice / 2);
-        centroidP = p0 + mp / (3 * twice);
-        centroidQ = q0 + mq / (3 * twice);
-        p = new double[n];
-        q = new double[n];
-        for (int i = 0; i < n; i++) {
-            double[] a = points.get(twice > 0 ? i : n - 1 - i);
-            p[i] = a[0] - centroidP;
-            q[i] = a[1] - centroidQ;
-        }
-        double pp = 0;
-        double qq = 0;
-        double pq = 0;
-        double far = 0;
-        for (int i = 0; i < n; i++) {
-            int j = (i + 1) % n;
-            double c = p[i] * q[j] - p[j] * q[i];
-            pp += c * (p[i] * p[i] + p[i] * p[j] + p[j] * p[j]) / 12;
-            qq += c * (q[i] * q[i] + q[i] * q[j] + q[j] * q[j]) / 12;
-            pq += c * (p[i] * q[j] + 2 * p[i] * q[i] + 2 * p[j] * q[j] + p[j] * q[i]) / 24;
-            far = Math.max(far, Math.hypot(p[i], q[i]));
-        }
-        spp = pp;
-        sqq = qq;
-        spq = pq;
-        radius = far;
+    private Outline(List<Stretch> placed) {
+        AreaMoments about = momentsOf(placed);
+        this.centroidP = about.p() / about.area();
+        this.centroidQ = about.q() / about.area();
+        this.stretches =
+                placed.stream().map(s -> moved(s, -centroidP, -centroidQ)).toList();
+        AreaMoments central = momentsOf(stretches);
+        this.whole = new AreaMoments(central.area(), 0, 0, central.pp(), central.pq(), central.qq());
     }
 
-    /** A polygon with sharp corners, in either sense. */
-    static Outline polygon(List<double[]> points) {
-        return new Outline(points);
+    private static AreaMoments momentsOf(List<Stretch> stretches) {
+        // A line so that everything lies inside: the half plane's own point is then the origin.
+        HalfPlane all = new HalfPlane(0, 0, 0);
+        for (Stretch stretch : stretches) {
+            if (stretch instanceof Stretch.Edge e) {
+                all.addStraight(e.p0(), e.q0(), e.p1(), e.q1());
+            } else if (stretch instanceof Stretch.Arc arc) {
+                all.addArc(arc.p(), arc.q(), arc.r(), arc.from(), arc.to());
+            }
+        }
+        return all.moments();
+    }
+
+    private static Stretch moved(Stretch stretch, double dp, double dq) {
+        if (stretch instanceof Stretch.Edge e) {
+            return new Stretch.Edge(e.p0() + dp, e.q0() + dq, e.p1() + dp, e.q1() + dq);
+        }
+        Stretch.Arc arc = (Stretch.Arc) stretch;
+        return new Stretch.Arc(arc.p() + dp, arc.q() + dq, arc.r(), arc.from(), arc.to());
     }
 
     /** A circle about (0, 0). */
     static Outline circle(double radius) {
-        int n = (int) Math.round(2 * Math.PI / STEP);
-        double r = radius * Math.sqrt(STEP / Math.sin(STEP));
-        List<double[]> points = new ArrayList<>(n);
-        for (int i = 0; i < n; i++) {
-            points.add(new double[] {r * Math.cos(i * STEP), r * Math.sin(i * STEP)});
-        }
-        return new Outline(points);
+        return new Outline(List.of(new Stretch.Arc(0, 0, radius, 0, 2 * Math.PI)));
     }
 
     /**
-     * A polygon with every corner rounded to an arc that touches both its edges.
+     * A polygon, in either sense, with every corner rounded to an arc that touches both its edges.
      *
+     * @param corners the corners (m)
+     * @param radius of the arcs, 0 for sharp corners (m)
      * @throws IllegalArgumentException when two arcs need more than the edge between them
      */
-    static Outline rounded(List<double[]> corners, double radius) {
-        int n = corners.size();
-        double[] tangents = new double[n];
+    static Outline polygon(List<double[]> corners, double radius) {
+        List<double[]> run = withoutRepeats(corners);
+        if (twiceArea(corners) < 0) {
+            Collections.reverse(run);
+        }
+        int n = run.size();
+        List<double[]> ends = new ArrayList<>();
+        List<Stretch> stretches = new ArrayList<>();
         for (int i = 0; i < n; i++) {
-            tangents[i] = radius * Math.tan(Math.abs(turn(corners, i)) / 2);
+            ends.add(arcEnds(run, i, radius));
         }
         for (int i = 0; i < n; i++) {
-            double[] a = corners.get(i);
-            double[] b = corners.get((i + 1) % n);
-            double length = Math.hypot(b[0] - a[0], b[1] - a[1]);
-            if (tangents[i] + tangents[(i + 1) % n] > length * (1 + SAME_POINT)) {
-                throw new IllegalArgumentException(
-                        "corner radius " + radius + " m does not fit an edge of " + length + " m");
+            double[] here = ends.get(i);
+            double[] next = ends.get((i + 1) % n);
+            checkFits(run, i, here, next, radius);
+            if (radius > 0 && here[5] != 0) {
+                stretches.add(arc(here, radius));
+            }
+            if (Math.hypot(next[0] - here[2], next[1] - here[3]) > SAME_POINT) {
+                stretches.add(new Stretch.Edge(here[2], here[3], next[0], next[1]));
             }
         }
-        List<double[]> points = new ArrayList<>();
-        for (int i = 0; i < n; i++) {
-            addArc(points, corners, i, radius, tangents[i]);
-        }
-        double[] first = points.get(0);
-        double[] last = points.get(points.size() - 1);
-        if (Math.hypot(first[0] - last[0], first[1] - last[1]) < SAME_POINT) {
-            points.remove(points.size() - 1);
-        }
-        return new Outline(points);
+        return new Outline(stretches);
     }
 
-    /** The change of direction at a corner (rad), positive to the left. */
-    private static double turn(List<double[]> corners, int i) {
+    private static List<double[]> withoutRepeats(List<double[]> corners) {
+        List<double[]> run = new ArrayList<>();
+        for (int i = 0; i < corners.size(); i++) {
+            double[] here = corners.get(i);
+            double[] next = corners.get((i + 1) % corners.size());
+            if (Math.hypot(next[0] - here[0], next[1] - here[1]) > SAME_POINT) {
+                run.add(here);
+            }
+        }
+        return run;
+    }
+
+    private static double twiceArea(List<double[]> corners) {
+        double twice = 0;
+        for (int i = 0; i < corners.size(); i++) {
+            double[] a = corners.get(i);
+            double[] b = corners.get((i + 1) % corners.size());
+            twice += a[0] * b[1] - b[0] * a[1];
+        }
+        return twice;
+    }
+
+    /** At a corner: start (p, q) and end (p, q) of its arc, the length of its tangents, its turn to the left (rad). */
+    private static double[] arcEnds(List<double[]> corners, int i, double radius) {
         int n = corners.size();
         double[] before = corners.get((i + n - 1) % n);
         double[] at = corners.get(i);
         double[] after = corners.get((i + 1) % n);
-        double ap = at[0] - before[0];
-        double aq = at[1] - before[1];
-        double bp = after[0] - at[0];
-        double bq = after[1] - at[1];
-        return Math.atan2(ap * bq - aq * bp, ap * bp + aq * bq);
+        double inP = at[0] - before[0];
+        double inQ = at[1] - before[1];
+        double outP = after[0] - at[0];
+        double outQ = after[1] - at[1];
+        double turn = Math.atan2(inP * outQ - inQ * outP, inP * outP + inQ * outQ);
+        double tangent = radius * Math.tan(Math.abs(turn) / 2);
+        double toIn = tangent / Math.hypot(inP, inQ);
+        double toOut = tangent / Math.hypot(outP, outQ);
+        return new double[] {
+            at[0] - toIn * inP, at[1] - toIn * inQ, at[0] + toOut * outP, at[1] + toOut * outQ, tangent, turn
+        };
     }
 
-    private static void addArc(List<double[]> points, List<double[]> corners, int i, double radius, double tangent) {
-        int n = corners.size();
-        double turn = turn(corners, i);
-        double[] before = corners.get((i + n - 1) % n);
-        double[] at = corners.get(i);
-        double length = Math.hypot(at[0] - before[0], at[1] - before[1]);
-        double dp = (at[0] - before[0]) / length;
-        double dq = (at[1] - before[1]) / length;
+    private static void checkFits(List<double[]> corners, int i, double[] here, double[] next, double radius) {
+        double[] a = corners.get(i);
+        double[] b = corners.get((i + 1) % corners.size());
+        double length = Math.hypot(b[0] - a[0], b[1] - a[1]);
+        if (here[4] + next[4] > length + SAME_POINT) {
+            throw new IllegalArgumentException(
+                    "corner radius " + radius + " m does not fit an edge of " + length + " m");
+        }
+    }
+
+    private static Stretch arc(double[] ends, double radius) {
+        double turn = ends[5];
         double side = Math.signum(turn);
-        double startP = at[0] - tangent * dp;
-        double startQ = at[1] - tangent * dq;
-        double centreP = startP - side * radius * dq;
-        double centreQ = startQ + side * radius * dp;
-        int edges = Math.max(2, (int) Math.ceil(Math.abs(turn) / STEP - 1e-9));
-        double step = turn / edges;
-        double inner = innerRadius(radius, Math.abs(turn), edges);
-        double angle = Math.atan2(startQ - centreQ, startP - centreP);
-        for (int k = 0; k <= edges; k++) {
-            double r = k == 0 || k == edges ? radius : inner;
-            double[] point = {centreP + r * Math.cos(angle + k * step), centreQ + r * Math.sin(angle + k * step)};
-            double[] last = points.isEmpty() ? null : points.get(points.size() - 1);
-            if (last == null || Math.hypot(point[0] - last[0], point[1] - last[1]) >= SAME_POINT) {
-                points.add(point);
+        // The centre lies square to the way in; the way in is the tangent at the arc's start.
+        double chordP = ends[2] - ends[0];
+        double chordQ = ends[3] - ends[1];
+        double towards = Math.atan2(chordQ, chordP) - turn / 2;
+        double centreP = ends[0] - side * radius * Math.sin(towards);
+        double centreQ = ends[1] + side * radius * Math.cos(towards);
+        double from = Math.atan2(ends[1] - centreQ, ends[0] - centreP);
+        return new Stretch.Arc(centreP, centreQ, radius, from, from + turn);
+    }
+
+    /** Moments of the whole, about the centroid. */
+    AreaMoments whole() {
+        return whole;
+    }
+
+    double centroidP() {
+        return centroidP;
+    }
+
+    double centroidQ() {
+        return centroidQ;
+    }
+
+    /** What lies inside a half plane. */
+    HalfPlane inside(double c, double a, double b) {
+        HalfPlane half = new HalfPlane(c, a, b);
+        addTo(half);
+        return half;
+    }
+
+    /** Adds what lies inside a half plane to it. */
+    void addTo(HalfPlane half) {
+        for (Stretch stretch : stretches) {
+            stretch.addTo(half);
+        }
+    }
+
+    /** Distances from a half plane's line of the places where the part inside changes its form (m). */
+    List<Double> corners(HalfPlane half) {
+        List<Double> distances = new ArrayList<>();
+        stretches.forEach(s -> s.addCorners(half, distances));
+        return distances;
+    }
+
+    /** Least and greatest reach along a direction from the centroid (m). */
+    double[] span(double a, double b) {
+        double[] span = {Double.POSITIVE_INFINITY, Double.NEGATIVE_INFINITY};
+        for (Stretch stretch : stretches) {
+            double[] own = stretch.span(a, b);
+            span[0] = Math.min(span[0], own[0]);
+            span[1] = Math.max(span[1], own[1]);
+        }
+        return span;
+    }
+
+    /** Points of a polygon of the same area, arcs in steps of at most {@link #STEP}, as p, q about the centroid. */
+    List<double[]> tessellated() {
+        List<double[]> points = new ArrayList<>();
+        for (Stretch stretch : stretches) {
+            if (stretch instanceof Stretch.Edge e) {
+                points.add(new double[] {e.p0(), e.q0()});
+            } else if (stretch instanceof Stretch.Arc arc) {
+                addPoints(points, arc);
             }
+        }
+        return points;
+    }
+
+    /** Points on an arc from its start until before its end, pushed out so far that the polygon has the arc's area. */
+    private static void addPoints(List<double[]> points, Stretch.Arc arc) {
+        double turn = arc.to() - arc.from();
+        boolean circle = Math.abs(turn) >= 2 * Math.PI - SAME_POINT;
+        int edges = Math.max(2, (int) Math.ceil(Math.abs(turn) / STEP - SAME_POINT));
+        double step = turn / edges;
+        double pushed =
+                circle ? arc.r() * Math.sqrt(step / Math.sin(step)) : innerRadius(arc.r(), Math.abs(turn), edges);
+        for (int k = 0; k < edges; k++) {
+            double r = k == 0 && !circle ? arc.r() : pushed;
+            double angle = arc.from() + k * step;
+            points.add(new double[] {arc.p() + r * Math.cos(angle), arc.q() + r * Math.sin(angle)});
         }
     }
 
@@ -167,51 +236,5 @@ final class Outline {
         double target = r * r * turn / (2 * Math.sin(turn / edges));
         double m = edges - 2;
         return m == 0 ? target / r : (Math.sqrt(r * r + 2 * m * target) - r) / m;
-    }
-
-    int size() {
-        return p.length;
-    }
-
-    /** First coordinate of a point from the centroid (m). */
-    double p(int i) {
-        return p[i];
-    }
-
-    /** Second coordinate of a point from the centroid (m). */
-    double q(int i) {
-        return q[i];
-    }
-
-    double area() {
-        return area;
-    }
-
-    double centroidP() {
-        return centroidP;
-    }
-
-    double centroidQ() {
-        return centroidQ;
-    }
-
-    /** ∫p² dA about the centroid (m⁴). */
-    double spp() {
-        return spp;
-    }
-
-    /** ∫q² dA about the centroid (m⁴). */
-    double sqq() {
-        return sqq;
-    }
-
-    /** ∫pq dA about the centroid (m⁴). */
-    double spq() {
-        return spq;
-    }
-
-    /** Greatest distance of a point from the centroid (m). */
-    double radius() {
-        return radius;
     }
 }

@@ -15,19 +15,19 @@ public final class Solid {
     private Solid(Mesh mesh, Optional<Extrusion> extrusion) {
         this.mesh = mesh;
         this.extrusion = extrusion;
-        double[] xyz = mesh.rawCoordinates();
-        double[] lo = {Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY, Double.POSITIVE_INFINITY};
-        double[] hi = {Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY, Double.NEGATIVE_INFINITY};
-        for (int i = 0; i < xyz.length; i++) {
-            lo[i % 3] = Math.min(lo[i % 3], xyz[i]);
-            hi[i % 3] = Math.max(hi[i % 3], xyz[i]);
-        }
-        this.least = new Vec3(lo[0], lo[1], lo[2]);
-        this.greatest = new Vec3(hi[0], hi[1], hi[2]);
-        Cut whole = new Cut(Plane.ofSlopes(hi[2], 0, 0));
+        double[] x = span(Axis.X.direction());
+        double[] y = span(Axis.Y.direction());
+        double[] z = span(Axis.Z.direction());
+        this.least = new Vec3(x[0], y[0], z[0]);
+        this.greatest = new Vec3(x[1], y[1], z[1]);
+        Cut whole = new Cut(Plane.ofSlopes(z[1], 0, 0));
         whole.addMesh(1, mesh);
-        this.volume = whole.volume();
-        this.moment = whole.moment();
+        this.volume = extrusion.map(Extrusion::volume).orElse(whole.volume());
+        this.moment = extrusion.map(Extrusion::moment).orElse(whole.moment());
+    }
+
+    private double[] span(Vec3 direction) {
+        return extrusion.map(e -> e.span(direction)).orElseGet(() -> mesh.span(direction));
     }
 
     /** The body bounded by a mesh. */
@@ -59,7 +59,7 @@ public final class Solid {
      * @throws IllegalArgumentException when the radius does not fit the edges
      */
     public static Solid prism(Axis axis, double from, double to, List<double[]> outline, double cornerRadius) {
-        Outline shape = cornerRadius > 0 ? Outline.rounded(outline, cornerRadius) : Outline.polygon(outline);
+        Outline shape = Outline.polygon(outline, cornerRadius);
         Vec3 first = axis.first();
         Vec3 second = axis.second();
         Vec3 along = first.cross(second);
@@ -141,12 +141,17 @@ public final class Solid {
         }
         if (middle + reach <= 0) {
             cut.addWhole(sign, volume, moment);
-        } else if (extrusion.isEmpty() || !extrusion.get().addBelow(cut, sign)) {
+        } else if (extrusion.isPresent()) {
+            extrusion.get().addBelow(cut, sign);
+        } else {
             cut.addMesh(sign, mesh);
         }
     }
 
-    /** The same integrals by clipping every triangle, with no short cut: the plain method that the fast one must equal. */
+    /**
+     * The same by clipping every triangle: the plain method. It equals the other on bodies with flat faces; curves are tessellated
+     * here (see {@link Outline#STEP}).
+     */
     public void addBelowByTriangles(Cut cut, double sign) {
         cut.addMesh(sign, mesh);
     }
