@@ -1,6 +1,7 @@
 package org.evendraft.geometry;
 
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 
 /** Bodies that together make one space, cut-outs negative: a hull, or the inside of a tank. Immutable. */
 public final class Assembly {
@@ -66,6 +67,26 @@ public final class Assembly {
             part.solid().addBelowByTriangles(cut, part.sign());
         }
         return cut;
+    }
+
+    /** The corner of the box round all parts with the least coordinates (m). */
+    public Vec3 least() {
+        return new Vec3(
+                least(p -> p.solid().least().x()),
+                least(p -> p.solid().least().y()),
+                least(p -> p.solid().least().z()));
+    }
+
+    /** The corner of the box round all parts with the greatest coordinates (m). */
+    public Vec3 greatest() {
+        return new Vec3(
+                -least(p -> -p.solid().greatest().x()),
+                -least(p -> -p.solid().greatest().y()),
+                -least(p -> -p.solid().greatest().z()));
+    }
+
+    private double least(ToDoubleFunction<Part> coordinate) {
+        return parts.stream().mapToDouble(coordinate).min().orElse(0);
     }
 
     /** Height of the lowest point (m). */

@@ -14,6 +14,9 @@ public final class MeshDefects {
     /** A triangle whose height is under this part of its longest edge has no area. */
     private static final double FLAT = 1e-12;
 
+    /** A mesh that winds twice, or the wrong way, round this part of its volume is no surface of a body. */
+    private static final double FOLDED = 1e-4;
+
     private static final int MOST_NAMED = 3;
 
     private MeshDefects() {}
@@ -31,14 +34,24 @@ public final class MeshDefects {
         flatTriangles(mesh).ifPresent(defects::add);
         edges(mesh).ifPresent(defects::add);
         if (defects.isEmpty()) {
-            double volume = Solid.ofMesh(mesh).volume();
-            if (volume < 0) {
-                defects.add("the mesh is inside out: its normals point inward");
-            } else if (!(volume > 0)) {
-                defects.add("the mesh bounds no volume");
-            }
+            orientation(Solid.ofMesh(mesh)).ifPresent(defects::add);
         }
         return defects;
+    }
+
+    private static Optional<String> orientation(Solid solid) {
+        double volume = solid.volume();
+        if (volume < 0) {
+            return Optional.of("the mesh is inside out: its normals point inward");
+        }
+        if (!(volume > 0)) {
+            return Optional.of("the mesh bounds no volume");
+        }
+        double folded = Overlap.folded(solid);
+        return folded <= FOLDED * volume
+                ? Optional.empty()
+                : Optional.of(String.format(
+                        Locale.ROOT, "the mesh crosses itself or is partly inside out: about %.3g m³ of it", folded));
     }
 
     private static boolean isFinite(Mesh mesh) {
@@ -65,9 +78,13 @@ public final class MeshDefects {
     }
 
     private static boolean isFlat(Mesh mesh, int i) {
-        Vec3 a = mesh.vertex(mesh.corner(i, 0));
-        Vec3 ab = mesh.vertex(mesh.corner(i, 1)).minus(a);
-        Vec3 ac = mesh.vertex(mesh.corner(i, 2)).minus(a);
+        return isFlat(mesh.vertex(mesh.corner(i, 0)), mesh.vertex(mesh.corner(i, 1)), mesh.vertex(mesh.corner(i, 2)));
+    }
+
+    /** Whether three points bound no area. */
+    static boolean isFlat(Vec3 a, Vec3 b, Vec3 c) {
+        Vec3 ab = b.minus(a);
+        Vec3 ac = c.minus(a);
         double longest = Math.max(ab.norm(), Math.max(ac.norm(), ac.minus(ab).norm()));
         return ab.cross(ac).norm() <= FLAT * longest * longest;
     }

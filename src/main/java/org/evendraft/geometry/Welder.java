@@ -43,9 +43,9 @@ final class Welder {
         return add(x, y, z);
     }
 
-    /** How many different points there are. */
-    int size() {
-        return size;
+    /** The point of a number. */
+    Vec3 point(int number) {
+        return new Vec3(xyz[3 * number], xyz[3 * number + 1], xyz[3 * number + 2]);
     }
 
     /** Coordinates of the points in the order of their numbers. */

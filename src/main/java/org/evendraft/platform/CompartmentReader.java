@@ -13,7 +13,7 @@ final class CompartmentReader {
         for (Fields fields : list) {
             compartments.add(new Compartment(
                     ids.read(fields),
-                    BodyCheck.whole(BodyReader.read(fields.someObjects("bodies")), fields, "bodies"),
+                    BodyCheck.read(fields.someObjects("bodies"), fields, "bodies"),
                     fields.number("permeability", Range.POSITIVE_FRACTION, 1)));
             fields.noOthers();
         }

@@ -6,6 +6,7 @@ import java.util.List;
 /** Gathers what is wrong with a document while it is read, so that all of it is told at once. One thread at a time. */
 public final class Faults {
     private final List<Fault> list = new ArrayList<>();
+    private final List<String> warnings = new ArrayList<>();
 
     /** Nothing gathered yet. */
     public Faults() {}
@@ -30,7 +31,17 @@ public final class Faults {
         list.add(new Fault(pointer, detail, Fault.Kind.MEANING));
     }
 
-    /** How many there are so far: unchanged after a part that had none. */
+    /** Adds a sentence on what deserves attention but is no fault. */
+    public void warn(String sentence) {
+        warnings.add(sentence);
+    }
+
+    /** The sentences on what deserves attention. */
+    public List<String> warnings() {
+        return List.copyOf(warnings);
+    }
+
+    /** How many faults there are so far: unchanged after a part that had none. */
     public int count() {
         return list.size();
     }

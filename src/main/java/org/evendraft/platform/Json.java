@@ -21,9 +21,7 @@ import com.fasterxml.jackson.databind.json.JsonMapper;
 import com.fasterxml.jackson.databind.module.SimpleModule;
 import com.fasterxml.jackson.datatype.jdk8.Jdk8Module;
 import com.fasterxml.jackson.datatype.jsr310.JavaTimeModule;
-import java.io.CharArrayReader;
 import java.io.IOException;
-import java.io.Reader;
 import java.io.UncheckedIOException;
 import java.nio.ByteBuffer;
 import java.nio.CharBuffer;
@@ -43,7 +41,7 @@ public final class Json {
     /** Deepest nesting of a document; the deepest of ours has eight. */
     private static final int DEEPEST = 64;
 
-    private static final char BYTE_ORDER_MARK = '\uFEFF';
+    private static final String BYTE_ORDER_MARK = "\uFEFF";
     private static final ObjectMapper MAPPER = newMapper();
 
     private Json() {}
@@ -74,7 +72,7 @@ public final class Json {
      * @throws FaultyDocumentException when they are not UTF-8, or not one whole JSON value; the sentence tells line and column
      */
     public static JsonNode parse(byte[] utf8) {
-        try (JsonParser parser = MAPPER.createParser(decode(utf8))) {
+        try (JsonParser parser = MAPPER.createParser(text(utf8))) {
             return tree(parser);
         } catch (IOException e) {
             throw new UncheckedIOException(e);
@@ -121,7 +119,12 @@ public final class Json {
         return " (line " + location.getLineNr() + ", column " + location.getColumnNr() + ")";
     }
 
-    private static Reader decode(byte[] utf8) {
+    /**
+     * The text of a document.
+     *
+     * @throws FaultyDocumentException when the bytes are not UTF-8; the sentence tells where
+     */
+    static String text(byte[] utf8) {
         CharsetDecoder decoder = StandardCharsets.UTF_8
                 .newDecoder()
                 .onMalformedInput(CodingErrorAction.REPORT)
@@ -132,8 +135,8 @@ public final class Json {
         if (result.isError()) {
             throw malformed("", "the document is not UTF-8: byte " + in.position() + " begins no character");
         }
-        int start = out.position() > 0 && out.get(0) == BYTE_ORDER_MARK ? 1 : 0;
-        return new CharArrayReader(out.array(), start, out.position() - start);
+        String text = out.flip().toString();
+        return text.startsWith(BYTE_ORDER_MARK) ? text.substring(1) : text;
     }
 
     private static FaultyDocumentException malformed(String pointer, String detail) {

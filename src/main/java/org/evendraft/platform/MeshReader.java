@@ -1,6 +1,7 @@
 package org.evendraft.platform;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import org.evendraft.geometry.Mesh;
@@ -22,8 +23,7 @@ final class MeshReader {
             fields.form("triangles", "a mesh must have triangles");
             return Optional.empty();
         }
-        double[] coordinates =
-                vertices.stream().flatMapToDouble(java.util.Arrays::stream).toArray();
+        double[] coordinates = vertices.stream().flatMapToDouble(Arrays::stream).toArray();
         Mesh mesh = new Mesh(coordinates, corners).tidied();
         List<String> defects = MeshDefects.of(mesh);
         defects.forEach(defect -> fields.meaning("triangles", defect));

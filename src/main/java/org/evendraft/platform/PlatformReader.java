@@ -16,20 +16,22 @@ public final class PlatformReader {
      * Reads a platform.
      *
      * @param document the document, as {@link Json#parse} gives it
+     * @return the platform, with warnings on what deserves attention
      * @throws FaultyDocumentException with all faults
      */
     public static PreparedPlatform read(JsonNode document) {
         Faults faults = new Faults();
         Platform platform = platform(Fields.of(document, "", faults));
         faults.throwIfAny();
-        return new PreparedPlatform(platform);
+        TankPlaces.warnings(platform.hull(), platform.tanks()).forEach(faults::warn);
+        return new PreparedPlatform(platform, faults.warnings());
     }
 
     private static Platform platform(Fields fields) {
         String id = Ids.checked(fields);
         double water = fields.number("waterDensity", Range.DENSITY, DEFAULT_WATER_DENSITY);
         Fields hull = fields.object("hull");
-        List<Body> bodies = BodyCheck.whole(BodyReader.read(hull.someObjects("bodies")), hull, "bodies");
+        List<Body> bodies = BodyCheck.read(hull.someObjects("bodies"), hull, "bodies");
         hull.noOthers();
         List<Fields> tankList = fields.objects("tanks");
         List<Tank> tanks = TankReader.read(tankList, water);

@@ -11,9 +11,20 @@ public final class PreparedPlatform {
     private final Platform platform;
     private final Assembly hull;
     private final Map<String, Calibration> calibrations;
+    private final List<String> warnings;
 
     /** Prepares a platform that has been checked. */
     public PreparedPlatform(Platform platform) {
+        this(platform, List.of());
+    }
+
+    /**
+     * Prepares a platform that has been checked.
+     *
+     * @param warnings sentences on what deserves attention in it
+     */
+    public PreparedPlatform(Platform platform, List<String> warnings) {
+        this.warnings = List.copyOf(warnings);
         this.platform = platform;
         this.hull = assembly(platform.hull());
         this.calibrations =
@@ -38,6 +49,11 @@ public final class PreparedPlatform {
     /** The platform. */
     public Platform platform() {
         return platform;
+    }
+
+    /** Sentences on what deserves attention in the platform itself: tanks outside the hull, bodies that graze each other. */
+    public List<String> warnings() {
+        return warnings;
     }
 
     /** The hull. */

@@ -42,7 +42,7 @@ final class TankReader {
                 fields.text("name", id),
                 fields.choice("purpose", Purpose.class).orElse(Purpose.OTHER),
                 fields.number("density", Range.DENSITY, waterDensity),
-                BodyCheck.whole(BodyReader.read(fields.objects("bodies")), fields, "bodies"),
+                BodyCheck.read(fields.objects("bodies"), fields, "bodies"),
                 TableReader.read(fields),
                 fields.number("permeability", Range.POSITIVE_FRACTION, 1),
                 fields.number("pressedUpFraction", Range.POSITIVE_FRACTION, DEFAULT_PRESSED_UP),

@@ -4,13 +4,18 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.math.BigDecimal;
 import java.math.MathContext;
 import java.util.Collection;
+import java.util.OptionalDouble;
+import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 
 /** How values and names are spelt in messages. */
 final class Words {
     private static final int MOST_NAMES = 8;
+    private static final Pattern DECIMAL =
+            Pattern.compile("[-+]?(\\d{1,40}\\.?\\d{0,40}|\\.\\d{1,40})([eE][-+]?\\d{1,4})?");
     private static final int LONGEST_QUOTE = 40;
     private static final MathContext SIX_DIGITS = new MathContext(6);
+    private static final MathContext TWO_DIGITS = new MathContext(2);
     private static final double PLAIN_UNDER = 1e9;
     private static final double PLAIN_OVER = 1e-4;
 
@@ -28,9 +33,27 @@ final class Words {
 
     /** A computed number, to six digits. */
     static String rounded(double value) {
+        return rounded(value, SIX_DIGITS);
+    }
+
+    /** An estimated number, to two digits. */
+    static String rough(double value) {
+        return rounded(value, TWO_DIGITS);
+    }
+
+    private static String rounded(double value, MathContext digits) {
         return Double.isFinite(value)
-                ? given(new BigDecimal(value).round(SIX_DIGITS).doubleValue())
+                ? given(new BigDecimal(value).round(digits).doubleValue())
                 : "unknown";
+    }
+
+    /** The value of a word that is a finite number in plain decimal spelling. */
+    static OptionalDouble number(String word) {
+        if (!DECIMAL.matcher(word).matches()) {
+            return OptionalDouble.empty();
+        }
+        double value = Double.parseDouble(word);
+        return Double.isFinite(value) ? OptionalDouble.of(value) : OptionalDouble.empty();
     }
 
     /** The first few of some names. */
