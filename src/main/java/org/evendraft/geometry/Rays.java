@@ -15,6 +15,9 @@ final class Rays {
     /** So many tests of a line against a triangle at most, or the grid gets coarser: they take about a second. */
     private static final long MOST_TESTS = 40_000_000;
 
+    /** Reaches are widened by this part of the rectangle, so that no line is lost to rounding. */
+    private static final double ROUNDING = 1e-9;
+
     private final double left;
     private final double front;
     private final double width;
@@ -59,7 +62,7 @@ final class Rays {
             for (Assembly.Part part : space.parts()) {
                 Tester tester = new Tester(part.solid().mesh());
                 for (int i = 0; i < part.solid().mesh().triangleCount(); i++) {
-                    tests += tester.turnTo(i) ? tester.cells() : 0;
+                    tests += tester.turnTo(i) ? tester.lines() : 0;
                 }
             }
         }
@@ -113,6 +116,10 @@ final class Rays {
         private int columnTo;
         private int rowFrom;
         private int rowTo;
+        private double low;
+        private double high;
+        private double leastX;
+        private double greatestX;
 
         Tester(Mesh mesh) {
             this.xyz = mesh.rawCoordinates();
@@ -124,8 +131,6 @@ final class Rays {
             a = 3 * corners[3 * triangle];
             b = 3 * corners[3 * triangle + 1];
             c = 3 * corners[3 * triangle + 2];
-            columnFrom = cell((least(0) - left) / width);
-            columnTo = cell((greatest(0) - left) / width);
             rowFrom = cell((least(1) - front) / depth);
             rowTo = cell((greatest(1) - front) / depth);
             doubleArea = cross(a, b, xyz[c], xyz[c + 1]);
@@ -146,13 +151,20 @@ final class Rays {
             return Math.max(xyz[a + k], Math.max(xyz[b + k], xyz[c + k]));
         }
 
-        long cells() {
-            return (columnTo - columnFrom + 1L) * (rowTo - rowFrom + 1L);
+        /** How many lines come near the triangle. */
+        long lines() {
+            long lines = 0;
+            for (int row = rowFrom; row <= rowTo; row++) {
+                turnToRow(row);
+                lines += columnTo - columnFrom + 1;
+            }
+            return lines;
         }
 
         void cross(Crossings.Gatherer gatherer, boolean cutOut) {
             boolean up = doubleArea > 0;
             for (int row = rowFrom; row <= rowTo; row++) {
+                turnToRow(row);
                 for (int column = columnFrom; column <= columnTo; column++) {
                     int ray = row * side + column;
                     if (isInside(up, x[ray], y[ray])) {
@@ -160,6 +172,34 @@ final class Rays {
                     }
                 }
             }
+        }
+
+        /** The columns that the triangle reaches in a row: a long narrow one has few of them. */
+        private void turnToRow(int row) {
+            low = front + depth * row / side;
+            high = front + depth * (row + 1) / side;
+            leastX = Double.POSITIVE_INFINITY;
+            greatestX = Double.NEGATIVE_INFINITY;
+            reach(a, b);
+            reach(b, c);
+            reach(c, a);
+            double rim = width * ROUNDING;
+            columnFrom = cell((leastX - rim - left) / width);
+            columnTo = leastX > greatestX ? columnFrom - 1 : cell((greatestX + rim - left) / width);
+        }
+
+        /** Widens the reach by an edge's part in the row. */
+        private void reach(int from, int to) {
+            double y0 = xyz[from + 1];
+            double y1 = xyz[to + 1];
+            if (Math.max(y0, y1) < low || Math.min(y0, y1) > high) {
+                return;
+            }
+            double slope = y1 == y0 ? 0 : (xyz[to] - xyz[from]) / (y1 - y0);
+            double x0 = y1 == y0 ? xyz[from] : xyz[from] + slope * (Math.max(low, Math.min(high, y0)) - y0);
+            double x1 = y1 == y0 ? xyz[to] : xyz[from] + slope * (Math.max(low, Math.min(high, y1)) - y0);
+            leastX = Math.min(leastX, Math.min(x0, x1));
+            greatestX = Math.max(greatestX, Math.max(x0, x1));
         }
 
         /** Each edge is judged the same way from both its triangles, so that no line slips between them. */
