@@ -2,6 +2,8 @@ package org.evendraft.store;
 
 import java.util.Locale;
 import java.util.Map;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 
 /** The kinds of database that can be used, and where they differ. */
 enum Engine {
@@ -13,6 +15,15 @@ enum Engine {
     POSTGRESQL;
 
     private static final String H2_PREFIX = "jdbc:h2:";
+
+    /** Addresses of H2 that name a file, as its manual lists them: a path, absolute or from here or from home, with or without prefix. */
+    private static final Pattern H2_FILE_ADDRESS = Pattern.compile("jdbc:h2:(?:file:)?([./~]|[A-Za-z]:[/\\\\])");
+
+    /**
+     * The way by which H2 reaches its file. Its usual one closes the file for good when a thread is interrupted while it reads,
+     * as one is whose request takes too long; this one does not.
+     */
+    private static final String H2_FILE_PREFIX = "jdbc:h2:async:";
 
     private static final String POSTGRESQL_PREFIX = "jdbc:postgresql:";
 
@@ -42,12 +53,14 @@ enum Engine {
                 "database.url = " + url + ": must start with " + H2_PREFIX + " or " + POSTGRESQL_PREFIX);
     }
 
-    /** The address with the settings that this engine needs and that the address leaves out. */
+    /** The address with the settings that this engine needs and that the address leaves out, and with the way to the file. */
     String completed(String url) {
         if (this == POSTGRESQL) {
             return url;
         }
-        StringBuilder completed = new StringBuilder(url);
+        Matcher file = H2_FILE_ADDRESS.matcher(url);
+        StringBuilder completed =
+                new StringBuilder(file.lookingAt() ? H2_FILE_PREFIX + url.substring(file.start(1)) : url);
         append(H2_SETTINGS, completed);
         if (this == H2_MEMORY) {
             append(H2_MEMORY_SETTINGS, completed);

@@ -2,7 +2,6 @@ package org.evendraft.store;
 
 import java.util.Optional;
 import org.junit.jupiter.api.AfterAll;
-import org.junit.jupiter.api.Assumptions;
 import org.testcontainers.DockerClientFactory;
 import org.testcontainers.postgresql.PostgreSQLContainer;
 import org.testcontainers.utility.DockerImageName;
@@ -18,9 +17,7 @@ final class PostgresRepositoryTest extends RepositoryContract {
 
     @Override
     Database open() {
-        boolean required = Boolean.parseBoolean(System.getenv("EVENDRAFT_TEST_REQUIRE_ALL"));
-        Assumptions.assumeTrue(
-                required || DockerClientFactory.instance().isDockerAvailable(), "there is no Docker engine");
+        Outside.skipWithout(DockerClientFactory.instance().isDockerAvailable(), "a Docker engine");
         String image = System.getenv().getOrDefault("EVENDRAFT_TEST_POSTGRES_IMAGE", USUAL_IMAGE);
         PostgreSQLContainer server =
                 new PostgreSQLContainer(DockerImageName.parse(image).asCompatibleSubstituteFor("postgres"));
