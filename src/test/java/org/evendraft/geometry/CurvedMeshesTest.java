@@ -104,9 +104,9 @@ class CurvedMeshesTest {
         assertThat(cut.projectedArea()).isCloseTo(area, relative(area, 1e-10));
         double it = roundedMoment(a, b, r);
         double il = roundedMoment(b, a, r);
-        assertThat(cut.projectedSecondMoments().transverse()).isCloseTo(it, relative(it, 1e-5));
-        assertThat(cut.projectedSecondMoments().longitudinal()).isCloseTo(il, relative(il, 1e-5));
-        assertThat(cut.projectedSecondMoments().product()).isCloseTo(0, within(1e-5 * it));
+        assertThat(cut.projectedSecondMoments().transverse()).isCloseTo(it, relative(it, 1e-9));
+        assertThat(cut.projectedSecondMoments().longitudinal()).isCloseTo(il, relative(il, 1e-9));
+        assertThat(cut.projectedSecondMoments().product()).isCloseTo(0, within(1e-9 * it));
     }
 
     /** Breadth at a height z over the foot of a lying prism, b broad and d deep, with corners of radius r. */
@@ -143,13 +143,13 @@ class CurvedMeshesTest {
         double moment = integral(z -> z * w.applyAsDouble(z), draft, r, d);
         double across = w.applyAsDouble(draft);
         Cut cut = below(pontoon, draft, 0, 0);
-        assertThat(cut.volume()).isCloseTo(length * area, relative(length * area, 1e-4));
-        assertThat(cut.centroid().z()).isCloseTo(moment / area, relative(moment / area, 1e-4));
-        assertThat(cut.centroid().y()).isCloseTo(29, within(1e-6));
-        assertThat(cut.area()).isCloseTo(length * across, relative(length * across, 1e-4));
+        assertThat(cut.volume()).isCloseTo(length * area, relative(length * area, 1e-8));
+        assertThat(cut.centroid().z()).isCloseTo(moment / area, relative(moment / area, 1e-8));
+        assertThat(cut.centroid().y()).isCloseTo(29, within(1e-8));
+        assertThat(cut.area()).isCloseTo(length * across, relative(length * across, 1e-8));
         double it = length * across * across * across / 12;
-        assertThat(cut.secondMoments().transverse()).isCloseTo(it, relative(it, 1e-4));
+        assertThat(cut.secondMoments().transverse()).isCloseTo(it, relative(it, 1e-8));
         double il = Math.pow(length, 3) * across / 12;
-        assertThat(cut.secondMoments().longitudinal()).isCloseTo(il, relative(il, 1e-4));
+        assertThat(cut.secondMoments().longitudinal()).isCloseTo(il, relative(il, 1e-8));
     }
 }
