@@ -48,6 +48,17 @@ public final class Optimiser {
         return search.run();
     }
 
+    /**
+     * Finds the best amounts for choices that are made already.
+     *
+     * @param model the question
+     * @param goal what is to be least
+     * @param choices the number of each tank's choice
+     */
+    public static Optional<Optimum> complete(Model model, Goal goal, List<Integer> choices) {
+        return new Completion(new Program(model, goal)).of(choices);
+    }
+
     private Answer run() {
         open.add(Node.root(program));
         while (!open.isEmpty() && nodes < mostNodes && !goodEnough()) {

@@ -21,7 +21,8 @@ public final class Point {
         return amount;
     }
 
-    double effect(int row) {
+    /** What it adds to a row. */
+    public double effect(int row) {
         return effects[row];
     }
 
@@ -34,8 +35,14 @@ public final class Point {
         return new Point(amount + part * (other.amount - amount), mixed);
     }
 
-    /** Adds the effects of the polyline at an amount. */
-    static void addEffects(List<Point> line, double amount, double[] sum) {
+    /**
+     * Adds the effects of a polyline at an amount.
+     *
+     * @param line its points, amounts rising
+     * @param amount an amount, taken at the nearer end when outside (t)
+     * @param sum the sum so far, by row
+     */
+    public static void addEffects(List<Point> line, double amount, double[] sum) {
         int i = 1;
         while (i < line.size() - 1 && line.get(i).amount < amount) {
             i++;

@@ -1,0 +1,204 @@
+package org.evendraft.ballast;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Map;
+import org.evendraft.ballast.PlanRequest.OperationLimits;
+import org.evendraft.geometry.Plane;
+import org.evendraft.platform.Pump;
+
+/**
+ * Puts transfers in order. Orders are tried by a quick estimate, heel and trim linear in what has been moved, and the most
+ * promising ones are followed exactly; where a limit is passed, the transfers are also tried in parts. Least excess over the limits comes
+ * first, then the shortest time, then the least heel and trim on the way.
+ */
+final class Ordering {
+    /** Up to this many transfers all orders are tried, of more only neighbours of the best one known. */
+    private static final int ALL_ORDERS_OF = 5;
+
+    private static final int MOST_TRIED = 400;
+    private static final int FOLLOWED = 4;
+    private static final int[] PARTS = {1, 2, 4};
+    private static final double SAME = 1e-9;
+    /** Samples between two instants while orders are compared. */
+    private static final int COARSE = 1;
+
+    private final Plant plant;
+    private final OperationLimits limits;
+    private final Response response;
+    private final double startHeel;
+    private final double startTrim;
+
+    Ordering(Plant plant, OperationLimits limits, ExactState start) {
+        this.plant = plant;
+        this.limits = limits;
+        Plane plane = start.waterplane().plane();
+        this.response = new Response(
+                plant.prepared(),
+                plant.water().density(),
+                plane,
+                plant.stowage(),
+                plant.stowage(),
+                plant.ballastHeight());
+        this.startHeel = -start.component(Response.SLOPE_Y);
+        this.startTrim = start.component(Response.SLOPE_X);
+    }
+
+    /** The best schedule found. */
+    Schedule best(List<Transfer> transfers) {
+        if (transfers.isEmpty()) {
+            return new Schedule(List.of());
+        }
+        List<Followed> followed = new ArrayList<>();
+        for (int parts : PARTS) {
+            List<Transfer> pieces = new ArrayList<>();
+            for (int i = 0; i < parts; i++) {
+                transfers.forEach(transfer -> pieces.add(transfer.inParts(parts).get(0)));
+            }
+            promising(pieces).forEach(estimate -> followed.add(follow(estimate)));
+            followed.sort(Followed.BEST_FIRST);
+            if (followed.get(0).excess() <= SAME) {
+                break;
+            }
+        }
+        return followed.get(0).schedule();
+    }
+
+    private record Followed(Schedule schedule, double excess, double duration, double swing) {
+        static final Comparator<Followed> BEST_FIRST = Comparator.comparingDouble(Followed::excess)
+                .thenComparingDouble(Followed::duration)
+                .thenComparingDouble(Followed::swing);
+    }
+
+    private Followed follow(Estimate estimate) {
+        Path path = Path.follow(plant, estimate.schedule(), limits, COARSE);
+        double swing =
+                path.worst(Quantity.HEEL).value() + path.worst(Quantity.TRIM).value();
+        return new Followed(estimate.schedule(), path.excess(), estimate.duration(), swing);
+    }
+
+    private record Estimate(Schedule schedule, List<Transfer> order, double excess, double duration, double swing) {
+        static final Comparator<Estimate> BEST_FIRST = Comparator.comparingDouble(Estimate::excess)
+                .thenComparingDouble(Estimate::duration)
+                .thenComparingDouble(Estimate::swing);
+        static final Comparator<Estimate> STEADIEST_FIRST =
+                Comparator.comparingDouble(Estimate::excess).thenComparingDouble(Estimate::swing);
+    }
+
+    /** The best estimates, some by time and some by how little the platform moves. */
+    private List<Estimate> promising(List<Transfer> pieces) {
+        List<Estimate> estimates = pieces.size() <= ALL_ORDERS_OF ? allOrders(pieces) : neighbours(pieces);
+        List<Estimate> chosen = new ArrayList<>();
+        chosen.addAll(estimates.stream()
+                .sorted(Estimate.BEST_FIRST)
+                .limit(FOLLOWED / 2)
+                .toList());
+        chosen.addAll(estimates.stream()
+                .sorted(Estimate.STEADIEST_FIRST)
+                .limit(FOLLOWED / 2)
+                .toList());
+        return chosen;
+    }
+
+    private List<Estimate> allOrders(List<Transfer> pieces) {
+        List<Estimate> estimates = new ArrayList<>();
+        permute(new ArrayList<>(pieces), 0, estimates);
+        return estimates;
+    }
+
+    private void permute(List<Transfer> order, int fixed, List<Estimate> estimates) {
+        if (fixed == order.size()) {
+            estimates.addAll(estimates(order));
+            return;
+        }
+        for (int i = fixed; i < order.size(); i++) {
+            List<Transfer> next = new ArrayList<>(order);
+            next.add(fixed, next.remove(i));
+            permute(next, fixed + 1, estimates);
+        }
+    }
+
+    /** Moves one transfer at a time to another place as long as that betters the estimate. */
+    private List<Estimate> neighbours(List<Transfer> pieces) {
+        List<Estimate> all = new ArrayList<>(estimates(pieces));
+        Estimate best = all.stream().min(Estimate.BEST_FIRST).orElseThrow();
+        boolean better = true;
+        while (better && all.size() < MOST_TRIED) {
+            better = false;
+            for (int i = 0; i < pieces.size() && all.size() < MOST_TRIED; i++) {
+                for (int j = 0; j < pieces.size(); j++) {
+                    List<Transfer> order = new ArrayList<>(best.order());
+                    order.add(j, order.remove(i));
+                    List<Estimate> now = estimates(order);
+                    all.addAll(now);
+                    Estimate first = now.stream().min(Estimate.BEST_FIRST).orElseThrow();
+                    if (Estimate.BEST_FIRST.compare(first, best) < 0) {
+                        best = first;
+                        better = true;
+                    }
+                }
+            }
+        }
+        return all;
+    }
+
+    /** An order with all pumps at once, with two at once, and one after another. */
+    private List<Estimate> estimates(List<Transfer> order) {
+        List<Pump> pumps = plant.prepared().platform().pumps();
+        List<Estimate> estimates = new ArrayList<>();
+        for (int atOnce : new int[] {pumps.size(), 2, 1}) {
+            if (atOnce <= pumps.size()) {
+                estimates.add(
+                        estimate(order, Schedule.of(order, pumps, plant.water().density(), atOnce)));
+            }
+        }
+        return estimates;
+    }
+
+    private Estimate estimate(List<Transfer> order, Schedule schedule) {
+        double worstHeel = Math.abs(startHeel);
+        double worstTrim = Math.abs(startTrim);
+        double swing = 0;
+        for (double minute : schedule.instants()) {
+            double[] moved = moved(schedule.gained(minute));
+            double heel = Math.abs(startHeel - moved[Response.SLOPE_Y]);
+            double trim = Math.abs(startTrim + moved[Response.SLOPE_X]);
+            worstHeel = Math.max(worstHeel, heel);
+            worstTrim = Math.max(worstTrim, trim);
+            swing += heel + trim;
+        }
+        double excess = over(worstHeel, limits.maxHeel().orElse(Double.POSITIVE_INFINITY), startHeel)
+                + over(worstTrim, limits.maxTrim().orElse(Double.POSITIVE_INFINITY), startTrim);
+        return new Estimate(schedule, order, excess, schedule.duration(), swing);
+    }
+
+    private static double over(double worst, double limit, double start) {
+        return Math.max(0, Math.toDegrees(Math.atan(worst)) - Math.max(limit, Math.toDegrees(Math.abs(start))));
+    }
+
+    private double[] moved(Map<String, Double> gained) {
+        double[] sum = new double[3];
+        for (BallastTank tank : plant.tanks()) {
+            double gain = gained.getOrDefault(tank.id(), 0.0);
+            if (gain != 0) {
+                double[] one = perTonne(tank);
+                for (int i = 0; i < sum.length; i++) {
+                    sum[i] += gain * one[i];
+                }
+            }
+        }
+        return sum;
+    }
+
+    /** The answer to a tonne in a tank, where the tank's middle is. */
+    private double[] perTonne(BallastTank tank) {
+        Contents full = new Contents(
+                tank.calibration(), tank.density(), tank.calibration().fullVolume(), false);
+        double[] answer = response.to(full);
+        for (int i = 0; i < answer.length; i++) {
+            answer[i] /= full.mass();
+        }
+        return answer;
+    }
+}

@@ -1,0 +1,134 @@
+package org.evendraft.ballast;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Set;
+import org.evendraft.platform.Pump;
+
+/** Transfers on pumps in time: one at a time on each pump and on each tank. Immutable. */
+record Schedule(List<Run> runs) {
+    private static final double MINUTES_IN_HOUR = 60;
+    /** Times closer than this are the same (min). */
+    static final double INSTANT = 1e-9;
+
+    /**
+     * A transfer on its pump.
+     *
+     * @param transfer the transfer
+     * @param pump the pump's id
+     * @param start when it starts (min)
+     * @param end when it ends (min)
+     */
+    record Run(Transfer transfer, String pump, double start, double end) {
+        /** The part done at an instant. */
+        double done(double minute) {
+            return Math.min(1, Math.max(0, (minute - start) / (end - start)));
+        }
+
+        /** Whether it is at work inside a span of time. */
+        boolean works(double from, double to) {
+            return start < to - INSTANT && end > from + INSTANT;
+        }
+    }
+
+    /**
+     * Starts each transfer as early as its pump and tanks allow, earlier ones of the list first.
+     *
+     * @param order the transfers
+     * @param pumps the pumps
+     * @param density density of the sea (t/m³)
+     * @param atOnce how many may run at once
+     */
+    static Schedule of(List<Transfer> order, List<Pump> pumps, double density, int atOnce) {
+        List<Transfer> waiting = new ArrayList<>(order);
+        List<Run> runs = new ArrayList<>();
+        double now = 0;
+        while (!waiting.isEmpty()) {
+            startAll(waiting, runs, pumps, density, now, atOnce);
+            double moment = now;
+            now = runs.stream()
+                    .mapToDouble(Run::end)
+                    .filter(end -> end > moment + INSTANT)
+                    .min()
+                    .orElseThrow(() -> new IllegalStateException("no pump for " + waiting));
+        }
+        runs.sort(Comparator.comparingDouble(Run::start));
+        return new Schedule(List.copyOf(runs));
+    }
+
+    private static void startAll(
+            List<Transfer> waiting, List<Run> runs, List<Pump> pumps, double density, double now, int atOnce) {
+        for (Transfer transfer : List.copyOf(waiting)) {
+            List<Run> working =
+                    runs.stream().filter(run -> run.end() > now + INSTANT).toList();
+            boolean busy = working.size() >= atOnce
+                    || working.stream().anyMatch(run -> run.transfer().sharesTank(transfer));
+            if (!busy) {
+                pumps.stream()
+                        .filter(pump -> transfer.possibleOn(pump)
+                                && working.stream().noneMatch(run -> run.pump().equals(pump.id())))
+                        .max(Comparator.comparingDouble(Pump::rate)
+                                .thenComparing(Comparator.comparing(Pump::id).reversed()))
+                        .ifPresent(pump -> {
+                            runs.add(run(transfer, pump, density, now));
+                            waiting.remove(transfer);
+                        });
+            }
+        }
+    }
+
+    private static Run run(Transfer transfer, Pump pump, double density, double now) {
+        double minutes = transfer.mass() / density / pump.rate() * MINUTES_IN_HOUR;
+        return new Run(transfer, pump.id(), now, now + minutes);
+    }
+
+    double duration() {
+        return runs.stream().mapToDouble(Run::end).max().orElse(0);
+    }
+
+    /** The instants at which something starts or ends, 0 included. */
+    List<Double> instants() {
+        List<Double> times = new ArrayList<>(List.of(0.0));
+        runs.forEach(run -> {
+            times.add(run.start());
+            times.add(run.end());
+        });
+        times.sort(Comparator.naturalOrder());
+        List<Double> distinct = new ArrayList<>();
+        for (double time : times) {
+            if (distinct.isEmpty() || time > distinct.get(distinct.size() - 1) + INSTANT) {
+                distinct.add(time);
+            }
+        }
+        return distinct;
+    }
+
+    /** What each tank has gained by an instant (t). */
+    Map<String, Double> gained(double minute) {
+        Map<String, Double> gained = new HashMap<>();
+        for (Run run : runs) {
+            double mass = run.transfer().mass() * run.done(minute);
+            gained.merge(run.transfer().to(), mass, Double::sum);
+            gained.merge(run.transfer().from(), -mass, Double::sum);
+        }
+        gained.remove(Pump.SEA);
+        return gained;
+    }
+
+    /** Tanks worked on inside a span of time. */
+    Set<String> moving(double from, double to) {
+        Set<String> moving = new HashSet<>();
+        for (Run run : runs) {
+            if (run.works(from, to)) {
+                moving.add(run.transfer().from());
+                moving.add(run.transfer().to());
+            }
+        }
+        moving.remove(Pump.SEA);
+        return moving;
+    }
+}
