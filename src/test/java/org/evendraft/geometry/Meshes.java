@@ -1,6 +1,7 @@
 package org.evendraft.geometry;
 
 import java.util.ArrayList;
+import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
@@ -17,8 +18,7 @@ public final class Meshes {
                 .flatMap(p -> List.of(p.x(), p.y(), p.z()).stream())
                 .mapToDouble(Double::doubleValue)
                 .toArray();
-        int[] corners =
-                triangles.stream().flatMapToInt(java.util.Arrays::stream).toArray();
+        int[] corners = triangles.stream().flatMapToInt(Arrays::stream).toArray();
         return new Mesh(xyz, corners);
     }
 

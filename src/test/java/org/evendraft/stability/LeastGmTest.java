@@ -10,6 +10,7 @@ import org.evendraft.geometry.Solid;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Body;
 import org.evendraft.platform.Fill;
+import org.evendraft.platform.PreparedPlatform;
 import org.evendraft.platform.Tank;
 import org.junit.jupiter.api.Test;
 
@@ -146,7 +147,7 @@ class LeastGmTest {
     }
 
     /** G moved by an arm so that its weight turns the platform about the azimuth by the right-hand rule: along (sin a, −cos a). */
-    private static org.evendraft.platform.PreparedPlatform platformWith(double a, double arm) {
+    private static PreparedPlatform platformWith(double a, double arm) {
         List<Body> hull = new ArrayList<>();
         double x = 0;
         double y = 0;

@@ -17,6 +17,7 @@ import net.jqwik.api.constraints.IntRange;
 import org.evendraft.geometry.Assembly;
 import org.evendraft.geometry.Cut;
 import org.evendraft.geometry.Meshes;
+import org.evendraft.geometry.SecondMoments;
 import org.evendraft.geometry.Solid;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Fill;
@@ -53,8 +54,8 @@ class LoadingsTest {
     static Tank tableTank(String id, double x0, double x1, double y0, double y1, double z0, double z1) {
         List<TableRow> rows = new ArrayList<>();
         double area = (x1 - x0) * (y1 - y0);
-        var surface = new org.evendraft.geometry.SecondMoments(
-                area * (y1 - y0) * (y1 - y0) / 12, area * (x1 - x0) * (x1 - x0) / 12, 0);
+        SecondMoments surface =
+                new SecondMoments(area * (y1 - y0) * (y1 - y0) / 12, area * (x1 - x0) * (x1 - x0) / 12, 0);
         for (double z : new double[] {z0, z1}) {
             rows.add(new TableRow(
                     z - z0, area * (z - z0), new Vec3((x0 + x1) / 2, (y0 + y1) / 2, (z0 + z) / 2), surface));
@@ -180,6 +181,25 @@ class LoadingsTest {
                 .toList());
         Cut held = shape.holding(t.liquid().volume(), slopeX, slopeY, Double.NaN);
         return shape.belowByTriangles(held.plane()).moment().times(t.density());
+    }
+
+    /** About the pontoon deck, where the waterplane and with it GM jump, a position is found or none exists, but none is missed. */
+    @Property(tries = 150, seed = "55", shrinking = ShrinkingMode.OFF)
+    void positionsAwashAtThePontoonDeckAreFound(@ForAll @IntRange(max = 1_000_000) int seed) {
+        Random random = new Random(seed);
+        double volume = 24_000 + (seed % 3 == 0 ? 0 : 300 * random.nextGaussian());
+        Vec3 g = new Vec3(2 * random.nextGaussian(), 2 * random.nextGaussian(), 10 + 20 * random.nextDouble());
+        PreparedPlatform platform = Floaters.platform(Floaters.twinPontoon(), SEA * volume, g, List.of());
+        Equilibrium found = LoadedPlatform.of(platform, Floaters.condition(List.of(), List.of()))
+                .floatingPosition();
+        assertThat(found).isNotInstanceOf(Equilibrium.Unresolved.class);
+        if (found instanceof Equilibrium.Afloat afloat) {
+            Cut hull = platform.hull().belowByTriangles(afloat.waterplane().plane());
+            assertThat(hull.volume()).isCloseTo(volume, within(RESIDUAL * volume));
+            assertThat(g.minus(hull.centroid()).cross(hull.plane().normal()).norm())
+                    .isLessThan(2 * RESIDUAL);
+            assertThat(afloat.stable()).isTrue();
+        }
     }
 
     /** As the moment goes to nothing the exact heel and trim become the estimates, liquids free in both. */

@@ -120,6 +120,19 @@ class TankStatesTest {
         }
     }
 
+    /** The greatest free surface is for the correction; in the exact position the liquid lies as it does. */
+    @Test
+    void countingTheGreatestFreeSurfaceLeavesTheExactPosition() {
+        Tank lying = Floaters.tank("C", Floaters.cylinder("C", new Vec3(-10, 0, 4), new Vec3(10, 0, 4), 6));
+        ConditionResult actual = evaluate(lying, 60, FreeSurface.ACTUAL);
+        ConditionResult maximum = evaluate(lying, 60, FreeSurface.MAXIMUM);
+        assertThat(maximum.floating()).isEqualTo(actual.floating());
+        assertThat(maximum.gm().transverse().solid())
+                .isEqualTo(actual.gm().transverse().solid());
+        assertThat(maximum.gm().transverse().corrected())
+                .isLessThan(actual.gm().transverse().corrected());
+    }
+
     @ParameterizedTest
     @EnumSource(FreeSurface.class)
     void emptyAndPressedUpTanksHaveNoFreeSurfaceHoweverItIsCounted(FreeSurface which) {
