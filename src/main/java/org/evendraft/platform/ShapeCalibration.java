@@ -52,14 +52,17 @@ public final class ShapeCalibration implements Calibration {
         if (!(level >= 0) || level > fullLevel()) {
             throw new IllegalArgumentException("level " + level + " of " + fullLevel() + " m");
         }
-        return permeability * shape.below(Plane.ofSlopes(bottom + level, 0, 0)).volume();
+        double volume =
+                permeability * shape.below(Plane.ofSlopes(bottom + level, 0, 0)).volume();
+        return Math.max(0, Math.min(fullVolume, volume));
     }
 
     @Override
     public Liquid holding(double volume) {
         double gross = Math.min(Math.max(volume, LEAST_PART * fullVolume) / permeability, shape.volume());
         Cut cut = shape.holding(gross, 0, 0, Double.NaN);
-        double level = volume == 0 ? 0 : cut.plane().origin().z() - bottom;
+        double surface = cut.plane().origin().z() - bottom;
+        double level = volume == 0 ? 0 : Math.max(0, Math.min(fullLevel(), surface));
         return new Liquid(level, volume, cut.centroid(), cut.secondMoments().times(permeability));
     }
 

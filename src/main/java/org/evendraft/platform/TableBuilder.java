@@ -15,7 +15,8 @@ import org.evendraft.geometry.Vec3;
 /**
  * Makes a table from a shape: rows are added, by halving, until what is read between two rows differs from the exact value by at
  * most 0.1 %: volume and second moments of themselves, the centroid's height of its height over the bottom, its x and y of the
- * tank's length and breadth. Under a millionth of the full volume nothing is refined.
+ * tank's length and breadth. Within a millionth of the full volume from empty and from full nothing is refined: there sections may
+ * shrink to a point.
  */
 final class TableBuilder {
     private static final double TOLERANCE = 1e-3;
@@ -60,7 +61,24 @@ final class TableBuilder {
                 rows.add(previous);
             }
         }
-        return List.copyOf(rows);
+        return rising(rows);
+    }
+
+    /** The rows without those that add nothing to the one before, as between two bodies one over the other; first and last stay. */
+    private static List<TableRow> rising(List<TableRow> rows) {
+        TableRow last = rows.get(rows.size() - 1);
+        List<TableRow> kept = new ArrayList<>(List.of(rows.get(0)));
+        for (TableRow row : rows.subList(1, rows.size() - 1)) {
+            if (isOver(row, kept.get(kept.size() - 1)) && isOver(last, row)) {
+                kept.add(row);
+            }
+        }
+        kept.add(last);
+        return List.copyOf(kept);
+    }
+
+    private static boolean isOver(TableRow row, TableRow other) {
+        return row.level() > other.level() && row.volume() > other.volume();
     }
 
     /** Heights at which the form may change abruptly: those of vertices, or of the parts' ends where curves make too many. */
@@ -88,7 +106,9 @@ final class TableBuilder {
     }
 
     private void refine(TableRow low, TableRow high, int depth) {
-        if (depth == 0 || high.volume() <= NEGLIGIBLE_PART * permeability * shape.volume()) {
+        double full = permeability * shape.volume();
+        double negligible = NEGLIGIBLE_PART * full;
+        if (depth == 0 || high.volume() <= negligible || low.volume() >= full - negligible) {
             return;
         }
         double mean = bottom + (low.level() + high.level()) / 2;
@@ -146,7 +166,15 @@ final class TableBuilder {
                 measured ? height - bottom : known,
                 measured ? permeability * cut.volume() : known,
                 cut.centroid(),
-                cut.secondMoments().times(permeability));
+                sound(cut.secondMoments().times(permeability)));
+    }
+
+    /** Second moments without what rounding adds to those of a section that is next to nothing. */
+    private static SecondMoments sound(SecondMoments s) {
+        double transverse = Math.max(0, s.transverse());
+        double longitudinal = Math.max(0, s.longitudinal());
+        double most = Math.sqrt(transverse * longitudinal);
+        return new SecondMoments(transverse, longitudinal, Math.max(-most, Math.min(most, s.product())));
     }
 
     /** The last row: the full tank, with the free surface just under its top. */
