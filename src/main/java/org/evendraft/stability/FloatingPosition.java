@@ -39,7 +39,8 @@ final class FloatingPosition {
 
     Equilibrium find() {
         Inclination start = Inclination.upright(platform);
-        if (platform.evenKeel().gm().least().corrected() > 0) {
+        // On even keel the energy's curvatures are the corrected GMs with the free surfaces that are really there.
+        if (start.energy().leastCurvature() > 0) {
             return descend(start);
         }
         return starts().map(slopes -> descend(start.at(slopes)))

@@ -31,7 +31,8 @@ final class Warnings {
             List<LimitResult> limits,
             Estimate estimate) {
         Warnings warnings = new Warnings();
-        warnings.onStability(evenKeel, afloat, estimate);
+        boolean upright = Inclination.upright(loaded).energy().leastCurvature() > 0;
+        warnings.onStability(upright, evenKeel, afloat, estimate);
         warnings.onLimits(condition, limits, evenKeel);
         warnings.onTanks(loaded);
         warnings.onLoads(platform, condition);
@@ -39,14 +40,19 @@ final class Warnings {
         return List.copyOf(warnings.sentences);
     }
 
-    private void onStability(EvenKeel evenKeel, Equilibrium.Afloat afloat, Estimate estimate) {
-        double least = evenKeel.gm().least().corrected();
-        if (least <= 0) {
+    private void onStability(boolean upright, EvenKeel evenKeel, Equilibrium.Afloat afloat, Estimate estimate) {
+        ConditionResult.LeastGm least = evenKeel.gm().least();
+        if (least.corrected() <= 0 && upright) {
+            add(
+                    "The least corrected GM on even keel is %.3f m (axis %.0f°) with the greatest free-surface moments asked for; with those"
+                            + " at the actual levels the platform still floats upright, and the position given is that one.",
+                    least.corrected(), least.azimuth());
+        } else if (least.corrected() <= 0) {
             add(
                     "The platform does not float upright: its least corrected GM on even keel is %.3f m (axis %.0f°). The position"
                             + " given is an angle of loll, heel %.2f° and trim %.2f°; do not correct it by weights on the high side alone.",
-                    least,
-                    evenKeel.gm().least().azimuth(),
+                    least.corrected(),
+                    least.azimuth(),
                     afloat.waterplane().heelAngle(),
                     afloat.waterplane().trimAngle());
         }
