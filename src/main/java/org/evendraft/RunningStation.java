@@ -8,6 +8,8 @@ import org.evendraft.cli.Station;
 import org.evendraft.http.HttpServer;
 import org.evendraft.http.Options;
 import org.evendraft.service.ControlRoom;
+import org.evendraft.service.Reason;
+import org.evendraft.service.Refusal;
 import org.evendraft.store.Database;
 import org.jspecify.annotations.Nullable;
 import org.slf4j.Logger;
@@ -31,13 +33,31 @@ final class RunningStation implements Station {
                 database, Clock.systemUTC(), () -> UUID.randomUUID().toString(), version);
     }
 
-    /** Opens the database and puts the service together; it is stopped with the program at the latest. */
+    /**
+     * Opens the database and puts the service together; it is stopped with the program at the latest.
+     *
+     * @throws Refusal when the database cannot be opened
+     */
     static RunningStation open(Settings settings, String version) {
-        Settings.DatabaseSettings at = settings.database();
-        Database database = Database.open(at.url(), at.user(), at.password());
+        Database database = open(settings.database());
         RunningStation station = new RunningStation(settings, database, version);
         Runtime.getRuntime().addShutdownHook(new Thread(station::close, "stop"));
         return station;
+    }
+
+    // The pool, the migrations and the drivers throw what they like; whoever starts the program needs one sentence.
+    private static Database open(Settings.DatabaseSettings at) {
+        try {
+            return Database.open(at.url(), at.user(), at.password());
+        } catch (RuntimeException e) {
+            LOG.debug("the database cannot be opened", e);
+            Throwable cause = e;
+            while (cause.getCause() != null) {
+                cause = cause.getCause();
+            }
+            throw new Refusal(
+                    Reason.UNAVAILABLE, "The database at " + at.url() + " cannot be opened: " + cause.getMessage());
+        }
     }
 
     @Override
@@ -72,9 +92,9 @@ final class RunningStation implements Station {
         HttpServer running = server;
         if (running != null) {
             running.close();
+            LOG.info("stopped");
         }
         database.close();
-        LOG.info("stopped");
         stopped.countDown();
     }
 }

@@ -1,6 +1,8 @@
 package org.evendraft.cli;
 
 import java.io.PrintStream;
+import java.io.PrintWriter;
+import java.nio.charset.StandardCharsets;
 import java.util.List;
 import org.evendraft.platform.Fault;
 import org.evendraft.platform.FaultyDocumentException;
@@ -36,14 +38,16 @@ public final class Program {
 
     static CommandLine commandLine(Launcher launcher, Console console) {
         CommandLine line = new CommandLine(new RootCommand())
+                .addSubcommand(new DemoCommand(launcher, console))
                 .addSubcommand(new ServeCommand(launcher, console))
                 .addSubcommand(new EvaluateCommand(launcher, console))
+                .addSubcommand(new PlanCommand(launcher, console))
                 .addSubcommand(new HydrostaticsCommand(console))
+                .addSubcommand(new MeshCommand(console))
                 .addSubcommand(new CommandLine.HelpCommand());
         line.getCommandSpec().version("evendraft " + launcher.version());
         line.getSubcommands().values().forEach(sub -> sub.setUsageHelpAutoWidth(true));
-        return line.setUsageHelpAutoWidth(true)
-                .setOut(new java.io.PrintWriter(console.out(), true, java.nio.charset.StandardCharsets.UTF_8));
+        return line.setUsageHelpAutoWidth(true).setOut(new PrintWriter(console.out(), true, StandardCharsets.UTF_8));
     }
 
     private static int misspelt(ParameterException e, Console console) {

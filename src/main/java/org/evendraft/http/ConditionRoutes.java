@@ -37,7 +37,8 @@ final class ConditionRoutes {
 
     private Answer evaluate(Request request) {
         new Query(request.query()).done();
-        return Answer.ok(evaluate.evaluate(request.variable("platform"), Json.parse(request.body())));
+        return writes.read(
+                request, () -> Reply.ok(evaluate.evaluate(request.variable("platform"), Json.parse(request.body()))));
     }
 
     private Answer add(Request request) {

@@ -4,11 +4,14 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.io.IOException;
 import java.io.UncheckedIOException;
 import java.util.ArrayList;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
 import org.evendraft.platform.Json;
+import org.evendraft.platform.TableRow;
+import org.evendraft.platform.TankTables;
 import org.evendraft.stability.HydrostaticRow;
 
 /** Tables as CSV (RFC 4180) with a header row; columns are named as the JSON's properties, points as {@code nameX, nameY, nameZ}. */
@@ -22,6 +25,10 @@ final class CsvText {
 
     static Answer hydrostatics(List<HydrostaticRow> rows) {
         return answer(rows.stream().map(CsvText::flat).toList());
+    }
+
+    static Answer table(List<TableRow> rows) {
+        return Answer.text(200, WITH_CHARSET, TankTables.toCsv(rows));
     }
 
     private static Answer answer(List<Map<String, String>> rows) {
@@ -38,7 +45,7 @@ final class CsvText {
     }
 
     private static Map<String, String> flat(Object row) {
-        Map<String, String> flat = new java.util.LinkedHashMap<>();
+        Map<String, String> flat = new LinkedHashMap<>();
         for (Map.Entry<String, JsonNode> property :
                 Json.mapper().valueToTree(row).properties()) {
             JsonNode value = property.getValue();

@@ -1,6 +1,8 @@
 package org.evendraft.http;
 
 import java.nio.ByteBuffer;
+import java.util.List;
+import java.util.Optional;
 import org.eclipse.jetty.http.HttpHeader;
 import org.eclipse.jetty.http.HttpStatus;
 import org.eclipse.jetty.server.Request;
@@ -20,9 +22,10 @@ final class ErrorPages extends ErrorHandler {
                 HttpStatus.getMessage(status),
                 status,
                 "The request cannot be read: " + HttpStatus.getMessage(status) + ".",
-                java.util.List.of(),
-                java.util.Optional.empty());
+                List.of(),
+                Optional.empty());
         response.getHeaders().put(HttpHeader.CONTENT_TYPE, Problem.MEDIA_TYPE);
+        response.getHeaders().put(Exchange.NO_SNIFF, "nosniff");
         response.write(true, ByteBuffer.wrap(AnswerJson.bytes(problem)), callback);
         return true;
     }

@@ -13,6 +13,8 @@ import org.slf4j.LoggerFactory;
 
 /** Carries a request from the web server to its route and the answer back, counting and logging it. */
 final class Exchange {
+    static final String NO_SNIFF = "X-Content-Type-Options";
+
     private static final Logger LOG = LoggerFactory.getLogger("org.evendraft.http.Access");
 
     private final Options options;
@@ -49,7 +51,6 @@ final class Exchange {
     }
 
     // The edge of the program: whatever goes wrong inside becomes a problem response here.
-    @SuppressWarnings("CatchAndPrintStackTrace")
     private Answer answer(Route route, Context context) {
         try {
             if (!route.open()) {
@@ -81,7 +82,7 @@ final class Exchange {
     private static void write(Answer answer, Context context) {
         context.status(answer.status());
         context.contentType(answer.contentType());
-        context.header("X-Content-Type-Options", "nosniff");
+        context.header(NO_SNIFF, "nosniff");
         context.header("Cache-Control", "no-store");
         answer.headers().forEach(context::header);
         context.result(answer.body());

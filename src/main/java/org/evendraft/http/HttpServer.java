@@ -5,8 +5,12 @@ import io.javalin.config.JavalinConfig;
 import io.javalin.http.Context;
 import io.javalin.http.HandlerType;
 import io.javalin.http.HttpResponseException;
+import io.javalin.util.JavalinBindException;
 import io.micrometer.core.instrument.MeterRegistry;
 import io.micrometer.prometheusmetrics.PrometheusMeterRegistry;
+import jakarta.servlet.http.HttpServletResponse;
+import java.io.IOException;
+import java.io.UncheckedIOException;
 import java.time.Duration;
 import java.util.List;
 import java.util.stream.Collectors;
@@ -15,6 +19,7 @@ import org.eclipse.jetty.server.handler.GracefulHandler;
 import org.evendraft.service.ControlRoom;
 import org.evendraft.service.Problem;
 import org.evendraft.service.Reason;
+import org.evendraft.service.Refusal;
 
 /** The service, listening. */
 public final class HttpServer implements AutoCloseable {
@@ -37,18 +42,29 @@ public final class HttpServer implements AutoCloseable {
         this.javalin = Javalin.create(this::configure);
     }
 
-    /** Starts to listen; when it returns, requests are answered. */
+    /**
+     * Starts to listen; when it returns, requests are answered.
+     *
+     * @throws Refusal when the address is taken
+     */
     public static HttpServer start(Options options, ControlRoom room) {
         PrometheusMeterRegistry meters = Meters.open();
         HttpServer server = new HttpServer(options, Routes.of(room, meters), meters);
-        server.javalin.start(options.host(), options.port());
+        try {
+            server.javalin.start(options.host(), options.port());
+        } catch (JavalinBindException e) {
+            server.workers.close();
+            throw new Refusal(
+                    Reason.UNAVAILABLE,
+                    "The address " + options.host() + ":" + options.port()
+                            + " cannot be listened at; is another program there? Set http.port (EVENDRAFT_HTTP_PORT).");
+        }
         return server;
     }
 
     private void configure(JavalinConfig config) {
         config.startup.showJavalinBanner = false;
         config.startup.startupWatcherEnabled = false;
-        config.http.maxRequestSize = options.maxBodyBytes();
         config.jetty.modifyServer(HttpServer::prepare);
         for (Route route : routes) {
             for (HandlerType method : methods(route)) {
@@ -57,10 +73,20 @@ public final class HttpServer implements AutoCloseable {
         }
         config.routes.exception(HttpResponseException.class, (e, c) -> turnDown(e.getStatus(), c));
         config.routes.exception(Exception.class, (e, c) -> exchange.turnDown(Failures.answer(e), c));
-        config.router.javaLangErrorHandler((response, error) -> {
-            Failures.answer(error);
-            response.setStatus(Reason.INTERNAL.status());
-        });
+        config.router.javaLangErrorHandler(HttpServer::failed);
+    }
+
+    /** The last resort, for what is thrown past every handler: memory or stack at their ends. */
+    private static void failed(HttpServletResponse response, Error error) {
+        Answer answer = Failures.answer(error);
+        response.setStatus(answer.status());
+        response.setContentType(answer.contentType());
+        response.setHeader(Exchange.NO_SNIFF, "nosniff");
+        try {
+            response.getOutputStream().write(answer.body());
+        } catch (IOException e) {
+            throw new UncheckedIOException(e);
+        }
     }
 
     /** Whoever may GET may also HEAD; the web server leaves the body out. */

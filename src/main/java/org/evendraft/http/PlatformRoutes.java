@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalInt;
 import org.evendraft.platform.Json;
+import org.evendraft.service.AnswerJson;
 import org.evendraft.service.ControlRoom;
 import org.evendraft.service.Pending;
 import org.evendraft.service.ReadPlatforms;
@@ -71,7 +72,7 @@ final class PlatformRoutes {
                 first ? CREATED : OK,
                 first ? Optional.of(PLATFORMS + "/" + stored.id()) : Optional.empty(),
                 Optional.of(Tags.of(stored.revision())),
-                org.evendraft.service.AnswerJson.text(stored),
+                AnswerJson.text(stored),
                 false);
     }
 }

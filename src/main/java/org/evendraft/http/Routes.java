@@ -16,7 +16,9 @@ final class Routes {
                         new PlatformRoutes(room, writes).routes(),
                         new HydrostaticRoutes(room).routes(),
                         new TankRoutes(room, writes).routes(),
-                        new ConditionRoutes(room, writes).routes())
+                        new TableRoutes(room, writes).routes(),
+                        new ConditionRoutes(room, writes).routes(),
+                        new PlanRoutes(room, writes).routes())
                 .flatMap(List::stream)
                 .toList();
     }

@@ -25,6 +25,11 @@ final class Writes {
         return answer(once.carryOut(key(request), work));
     }
 
+    /** Answers a POST that stores nothing; with a key the answer itself is stored, and given again. */
+    Answer read(Request request, Supplier<Reply> work) {
+        return request.header(KEY).isPresent() ? post(request, () -> Pending.of(work.get())) : answer(work.get());
+    }
+
     /** Carries out a PUT, which may be repeated as it is. */
     Answer put(Supplier<Pending<Reply>> work) {
         return answer(once.carryOut(Optional.empty(), work));

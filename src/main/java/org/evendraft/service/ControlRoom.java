@@ -5,6 +5,7 @@ import java.util.function.Supplier;
 import org.evendraft.store.ConditionRepository;
 import org.evendraft.store.Database;
 import org.evendraft.store.IdempotencyRepository;
+import org.evendraft.store.PlanRepository;
 import org.evendraft.store.PlatformRepository;
 import org.evendraft.store.SoundingRepository;
 
@@ -20,6 +21,9 @@ public final class ControlRoom {
     private final EvaluateCondition evaluateCondition;
     private final StoreCondition storeCondition;
     private final ReadConditions readConditions;
+    private final TankTableFile tankTableFile;
+    private final MakePlan makePlan;
+    private final ReadPlans readPlans;
     private final CheckHealth checkHealth;
 
     /**
@@ -44,6 +48,10 @@ public final class ControlRoom {
         this.evaluateCondition = new EvaluateCondition(shelf, new LatestFills(readTankStates), source);
         this.storeCondition = new StoreCondition(evaluateCondition, conditions);
         this.readConditions = new ReadConditions(database, shelf, conditions);
+        this.tankTableFile = new TankTableFile(shelf, storePlatform);
+        PlanRepository plans = new PlanRepository(clock, ids);
+        this.makePlan = new MakePlan(shelf, readConditions, plans, source);
+        this.readPlans = new ReadPlans(database, readConditions, plans);
         this.checkHealth = new CheckHealth(database, engineVersion);
     }
 
@@ -95,6 +103,21 @@ public final class ControlRoom {
     /** Reads conditions. */
     public ReadConditions readConditions() {
         return readConditions;
+    }
+
+    /** Reads and replaces calibration tables. */
+    public TankTableFile tankTableFile() {
+        return tankTableFile;
+    }
+
+    /** Makes plans. */
+    public MakePlan makePlan() {
+        return makePlan;
+    }
+
+    /** Reads plans. */
+    public ReadPlans readPlans() {
+        return readPlans;
     }
 
     /** Checks health. */

@@ -40,7 +40,8 @@ public final class Once {
         IdempotentRequest known = request.get();
         Optional<Claim> earlier = database.read(handle -> answers.find(handle, known));
         if (earlier.isPresent()) {
-            return replay(earlier.get());
+            // Another thread may have committed that answer and not yet flushed it: this returns when it is on disk.
+            return database.inTransaction(handle -> replay(earlier.get()));
         }
         Pending<Reply> pending = work.get();
         return database.inTransaction(handle -> store(handle, known, pending));

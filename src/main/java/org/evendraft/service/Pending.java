@@ -15,6 +15,11 @@ public final class Pending<T> {
         this.write = write;
     }
 
+    /** Something to tell that needs no writing. */
+    public static <T> Pending<T> of(T told) {
+        return new Pending<>(handle -> told);
+    }
+
     /** The same write, telling something else. */
     public <R> Pending<R> then(Function<? super T, ? extends R> next) {
         return new Pending<>(handle -> next.apply(write.apply(handle)));

@@ -10,6 +10,7 @@ import org.evendraft.platform.PreparedPlatform;
 import org.evendraft.store.Database;
 import org.evendraft.store.PlatformRepository;
 import org.evendraft.store.StoredPlatform;
+import org.jspecify.annotations.Nullable;
 
 /** Takes platforms out of the store and keeps the few used last prepared, for preparing takes longer than computing. */
 final class PlatformShelf {
@@ -86,7 +87,7 @@ final class PlatformShelf {
         return new PlatformAtRevision(stored.revision(), ready);
     }
 
-    private @org.jspecify.annotations.Nullable PreparedPlatform onShelf(Place place) {
+    private @Nullable PreparedPlatform onShelf(Place place) {
         synchronized (shelf) {
             return shelf.get(place);
         }

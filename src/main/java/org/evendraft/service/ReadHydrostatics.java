@@ -1,5 +1,6 @@
 package org.evendraft.service;
 
+import com.fasterxml.jackson.annotation.JsonUnwrapped;
 import java.util.List;
 import org.evendraft.platform.FaultyDocumentException;
 import org.evendraft.platform.PreparedPlatform;
@@ -27,7 +28,7 @@ public final class ReadHydrostatics {
     public record HydrostaticTable(
             double waterDensity,
             List<HydrostaticRow> rows,
-            @com.fasterxml.jackson.annotation.JsonUnwrapped Provenance provenance) {
+            @JsonUnwrapped Provenance provenance) {
 
         /** Copies the list. */
         public HydrostaticTable {

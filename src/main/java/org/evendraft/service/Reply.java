@@ -19,6 +19,11 @@ public record Reply(int status, Optional<String> location, Optional<String> etag
         return new Reply(201, Optional.of(location), Optional.empty(), AnswerJson.text(content), false);
     }
 
+    /** Nothing was stored. */
+    public static Reply ok(Object content) {
+        return new Reply(200, Optional.empty(), Optional.empty(), AnswerJson.text(content), false);
+    }
+
     IdempotentAnswer toStore() {
         return new IdempotentAnswer(status, location, etag, Optional.empty(), body);
     }
