@@ -1,5 +1,7 @@
 package org.evendraft.platform;
 
+import static java.nio.charset.StandardCharsets.UTF_8;
+
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.MissingNode;
 import java.util.ArrayList;
@@ -153,6 +155,9 @@ public final class Fields {
             faults.form(at, name + " must not be empty");
         } else if (text.length() > LONGEST_TEXT) {
             faults.form(at, name + " must have at most " + LONGEST_TEXT + " characters, not " + text.length());
+        } else if (text.chars().anyMatch(Character::isISOControl)
+                || !UTF_8.newEncoder().canEncode(text)) {
+            faults.form(at, name + " must not hold control characters or halves of characters");
         }
         return text;
     }

@@ -13,6 +13,7 @@ import org.evendraft.geometry.Vec3;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import org.junit.jupiter.params.provider.ValueSource;
 
 class ConditionReaderTest {
     private static final PreparedPlatform SKUA = Examples.prepared();
@@ -157,5 +158,13 @@ class ConditionReaderTest {
         assertThat(ConditionReader.read(document, SKUA).loads()).hasSize(100_000);
         ((ObjectNode) loads.get(99_999)).put("mass", 0);
         assertThat(faults(document)).singleElement().extracting(Fault::pointer).isEqualTo("/loads/99999/mass");
+    }
+
+    @ParameterizedTest
+    @ValueSource(strings = {"\\u0000", "a\\u0007b", "half \\ud800", "two\\nlines"})
+    void refusesTextThatNoDatabaseOrLineCanKeep(String name) {
+        List<Fault> faults = faults(Examples.parse("{ \"name\": \"" + name + "\" }"));
+        assertThat(faults).extracting(Fault::pointer).containsExactly("/name");
+        assertThat(faults.get(0).kind()).isEqualTo(Fault.Kind.FORM);
     }
 }
