@@ -2,8 +2,10 @@ package org.evendraft.ballast;
 
 import java.util.ArrayList;
 import java.util.Comparator;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalDouble;
 import org.evendraft.ballast.PlanRequest.OperationLimits;
 import org.evendraft.geometry.Plane;
 import org.evendraft.platform.Pump;
@@ -19,14 +21,27 @@ final class Ordering {
 
     private static final int MOST_TRIED = 400;
     private static final int FOLLOWED = 4;
-    private static final int[] PARTS = {1, 2, 4};
+    private static final int[] PARTS = {2, 4, 8};
+    /** Parts are not tried when they would be more than this many orders to carry out. */
+    private static final int MOST_PIECES = 24;
+    /** Transfers are parted only when that takes off this part of the excess. */
+    private static final double WORTH = 0.5;
+
     private static final double SAME = 1e-9;
+    /** All pumps at once, the same without overtaking, two at once without overtaking, one after another. */
+    private static final List<Schedule.Rule> RULES = List.of(
+            new Schedule.Rule(Integer.MAX_VALUE, true),
+            new Schedule.Rule(Integer.MAX_VALUE, false),
+            new Schedule.Rule(2, false),
+            new Schedule.Rule(1, false));
     /** Samples between two instants while orders are compared. */
     private static final int COARSE = 1;
 
     private final Plant plant;
     private final OperationLimits limits;
-    private final Response response;
+    /** The answer of draft and slopes to a tonne in each tank. */
+    private final Map<String, double[]> perTonne = new HashMap<>();
+
     private final double startHeel;
     private final double startTrim;
 
@@ -34,13 +49,14 @@ final class Ordering {
         this.plant = plant;
         this.limits = limits;
         Plane plane = start.waterplane().plane();
-        this.response = new Response(
+        Response response = new Response(
                 plant.prepared(),
                 plant.water().density(),
                 plane,
                 plant.stowage(),
                 plant.stowage(),
                 plant.ballastHeight());
+        plant.tanks().forEach(tank -> perTonne.put(tank.id(), perTonne(tank, response)));
         this.startHeel = -start.component(Response.SLOPE_Y);
         this.startTrim = start.component(Response.SLOPE_X);
     }
@@ -50,19 +66,29 @@ final class Ordering {
         if (transfers.isEmpty()) {
             return new Schedule(List.of());
         }
-        List<Followed> followed = new ArrayList<>();
+        Followed best = bestOf(transfers);
         for (int parts : PARTS) {
-            List<Transfer> pieces = new ArrayList<>();
-            for (int i = 0; i < parts; i++) {
-                transfers.forEach(transfer -> pieces.add(transfer.inParts(parts).get(0)));
-            }
-            promising(pieces).forEach(estimate -> followed.add(follow(estimate)));
-            followed.sort(Followed.BEST_FIRST);
-            if (followed.get(0).excess() <= SAME) {
-                break;
+            if (best.excess() > SAME && parts * transfers.size() <= MOST_PIECES) {
+                Followed parted = bestOf(inParts(transfers, parts));
+                best = parted.excess() < WORTH * best.excess() ? parted : best;
             }
         }
-        return followed.get(0).schedule();
+        return best.schedule();
+    }
+
+    private static List<Transfer> inParts(List<Transfer> transfers, int parts) {
+        List<Transfer> pieces = new ArrayList<>();
+        for (int i = 0; i < parts; i++) {
+            transfers.forEach(transfer -> pieces.add(transfer.part(parts)));
+        }
+        return pieces;
+    }
+
+    private Followed bestOf(List<Transfer> transfers) {
+        return promising(transfers).stream()
+                .map(this::follow)
+                .min(Followed.BEST_FIRST)
+                .orElseThrow();
     }
 
     private record Followed(Schedule schedule, double excess, double duration, double swing) {
@@ -143,56 +169,65 @@ final class Ordering {
         return all;
     }
 
-    /** An order with all pumps at once, with two at once, and one after another. */
+    /** An order by each rule. */
     private List<Estimate> estimates(List<Transfer> order) {
         List<Pump> pumps = plant.prepared().platform().pumps();
         List<Estimate> estimates = new ArrayList<>();
-        for (int atOnce : new int[] {pumps.size(), 2, 1}) {
-            if (atOnce <= pumps.size()) {
-                estimates.add(
-                        estimate(order, Schedule.of(order, pumps, plant.water().density(), atOnce)));
-            }
+        for (Schedule.Rule rule : RULES) {
+            estimates.add(
+                    estimate(order, Schedule.of(order, pumps, plant.water().density(), rule)));
         }
         return estimates;
     }
 
     private Estimate estimate(List<Transfer> order, Schedule schedule) {
-        double worstHeel = Math.abs(startHeel);
-        double worstTrim = Math.abs(startTrim);
-        double swing = 0;
+        Watch heelWatch = new Watch(limits.maxHeel());
+        Watch trimWatch = new Watch(limits.maxTrim());
         for (double minute : schedule.instants()) {
             double[] moved = moved(schedule.gained(minute));
-            double heel = Math.abs(startHeel - moved[Response.SLOPE_Y]);
-            double trim = Math.abs(startTrim + moved[Response.SLOPE_X]);
-            worstHeel = Math.max(worstHeel, heel);
-            worstTrim = Math.max(worstTrim, trim);
-            swing += heel + trim;
+            heelWatch.see(startHeel - moved[Response.SLOPE_Y]);
+            trimWatch.see(startTrim + moved[Response.SLOPE_X]);
         }
-        double excess = over(worstHeel, limits.maxHeel().orElse(Double.POSITIVE_INFINITY), startHeel)
-                + over(worstTrim, limits.maxTrim().orElse(Double.POSITIVE_INFINITY), startTrim);
-        return new Estimate(schedule, order, excess, schedule.duration(), swing);
+        return new Estimate(
+                schedule,
+                order,
+                heelWatch.excess + trimWatch.excess,
+                schedule.duration(),
+                heelWatch.swing + trimWatch.swing);
     }
 
-    private static double over(double worst, double limit, double start) {
-        return Math.max(0, Math.toDegrees(Math.atan(worst)) - Math.max(limit, Math.toDegrees(Math.abs(start))));
+    /** Keeps the excess of an angle over its limit, which is never under what the angle has come down to. */
+    private static final class Watch {
+        private final double limit;
+        private double allowed = Double.POSITIVE_INFINITY;
+        private double excess;
+        private double swing;
+
+        Watch(OptionalDouble limit) {
+            this.limit = limit.orElse(Double.POSITIVE_INFINITY);
+        }
+
+        void see(double slope) {
+            double angle = Math.toDegrees(Math.atan(Math.abs(slope)));
+            excess = Math.max(excess, allowed == Double.POSITIVE_INFINITY ? 0 : angle - allowed);
+            allowed = Math.max(limit, Math.min(allowed, angle));
+            swing = Math.max(swing, angle);
+        }
     }
 
     private double[] moved(Map<String, Double> gained) {
         double[] sum = new double[3];
-        for (BallastTank tank : plant.tanks()) {
-            double gain = gained.getOrDefault(tank.id(), 0.0);
-            if (gain != 0) {
-                double[] one = perTonne(tank);
-                for (int i = 0; i < sum.length; i++) {
-                    sum[i] += gain * one[i];
-                }
+        gained.forEach((tank, gain) -> {
+            double[] one = perTonne.getOrDefault(tank, sum);
+            for (int i = 0; i < sum.length; i++) {
+                sum[i] += gain * one[i];
             }
-        }
+        });
         return sum;
     }
 
     /** The answer to a tonne in a tank, where the tank's middle is. */
-    private double[] perTonne(BallastTank tank) {
+    private static double[] perTonne(BallastTank tank, Response response) {
         Contents full = new Contents(
                 tank.calibration(), tank.density(), tank.calibration().fullVolume(), false);
         double[] answer = response.to(full);

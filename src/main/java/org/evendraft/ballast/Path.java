@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.HashMap;
 import java.util.List;
+import java.util.Locale;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
@@ -128,10 +129,10 @@ final class Path {
         excesses.forEach((quantity, peak) -> {
             if (peak.figure() > ROUNDING) {
                 sentences.add(String.format(
-                        java.util.Locale.ROOT,
+                        Locale.ROOT,
                         "On the way a limit is passed: at minute %.1f the %s is %s beyond what is allowed there; the worst is %s at minute %.1f.",
                         peak.minute(),
-                        quantity.name(),
+                        quantity.words(),
                         quantity.amount(peak.figure()),
                         quantity.told(peaks.getOrDefault(quantity, peak).figure()),
                         peaks.getOrDefault(quantity, peak).minute()));
@@ -139,7 +140,7 @@ final class Path {
         });
         if (!afloat()) {
             sentences.add(String.format(
-                    java.util.Locale.ROOT,
+                    Locale.ROOT,
                     "On the way the platform would sink or capsize: the computation finds no floating position at minute %.1f.",
                     lostAt));
         }

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.HashMap;
 import java.util.HashSet;
+import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Set;
@@ -134,7 +135,7 @@ final class Plant {
 
     /** The condition with other masses in the tanks, in their order. */
     Condition with(double[] masses) {
-        Map<String, Fill> fills = new java.util.LinkedHashMap<>();
+        Map<String, Fill> fills = new LinkedHashMap<>();
         condition.fills().forEach(fill -> fills.put(fill.tank(), fill));
         for (int t = 0; t < masses.length; t++) {
             BallastTank tank = tanks.get(t);

@@ -46,6 +46,11 @@ enum Quantity {
         return limit.isPresent() ? OptionalDouble.of(sign * limit.getAsDouble()) : limit;
     }
 
+    /** Its name for people. */
+    String words() {
+        return words;
+    }
+
     /** The figure as people read it. */
     double plain(double figure) {
         return sign * figure;

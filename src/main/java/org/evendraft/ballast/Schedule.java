@@ -6,6 +6,7 @@ import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import org.evendraft.platform.Pump;
 
@@ -41,14 +42,14 @@ record Schedule(List<Run> runs) {
      * @param order the transfers
      * @param pumps the pumps
      * @param density density of the sea (t/m³)
-     * @param atOnce how many may run at once
+     * @param rule how many may run at once, and whether one may start before those that come before it in the list
      */
-    static Schedule of(List<Transfer> order, List<Pump> pumps, double density, int atOnce) {
+    static Schedule of(List<Transfer> order, List<Pump> pumps, double density, Rule rule) {
         List<Transfer> waiting = new ArrayList<>(order);
         List<Run> runs = new ArrayList<>();
         double now = 0;
         while (!waiting.isEmpty()) {
-            startAll(waiting, runs, pumps, density, now, atOnce);
+            startAll(waiting, runs, pumps, density, now, rule);
             double moment = now;
             now = runs.stream()
                     .mapToDouble(Run::end)
@@ -61,25 +62,38 @@ record Schedule(List<Run> runs) {
     }
 
     private static void startAll(
-            List<Transfer> waiting, List<Run> runs, List<Pump> pumps, double density, double now, int atOnce) {
+            List<Transfer> waiting, List<Run> runs, List<Pump> pumps, double density, double now, Rule rule) {
         for (Transfer transfer : List.copyOf(waiting)) {
             List<Run> working =
                     runs.stream().filter(run -> run.end() > now + INSTANT).toList();
-            boolean busy = working.size() >= atOnce
+            boolean busy = working.size() >= rule.atOnce()
                     || working.stream().anyMatch(run -> run.transfer().sharesTank(transfer));
-            if (!busy) {
-                pumps.stream()
-                        .filter(pump -> transfer.possibleOn(pump)
-                                && working.stream().noneMatch(run -> run.pump().equals(pump.id())))
-                        .max(Comparator.comparingDouble(Pump::rate)
-                                .thenComparing(Comparator.comparing(Pump::id).reversed()))
-                        .ifPresent(pump -> {
-                            runs.add(run(transfer, pump, density, now));
-                            waiting.remove(transfer);
-                        });
+            Optional<Pump> pump = busy ? Optional.empty() : fastest(transfer, working, pumps);
+            if (pump.isPresent()) {
+                runs.add(run(transfer, pump.get(), density, now));
+                waiting.remove(transfer);
+            } else if (!rule.overtaking()) {
+                return;
             }
         }
     }
+
+    /** The fastest idle pump that can do it, the first by name among equals. */
+    private static Optional<Pump> fastest(Transfer transfer, List<Run> working, List<Pump> pumps) {
+        return pumps.stream()
+                .filter(pump -> transfer.possibleOn(pump)
+                        && working.stream().noneMatch(run -> run.pump().equals(pump.id())))
+                .max(Comparator.comparingDouble(Pump::rate)
+                        .thenComparing(Comparator.comparing(Pump::id).reversed()));
+    }
+
+    /**
+     * What a schedule may do.
+     *
+     * @param atOnce how many transfers may run at once
+     * @param overtaking whether a transfer may start before one that comes before it in the list
+     */
+    record Rule(int atOnce, boolean overtaking) {}
 
     private static Run run(Transfer transfer, Pump pump, double density, double now) {
         double minutes = transfer.mass() / density / pump.rate() * MINUTES_IN_HOUR;

@@ -15,7 +15,8 @@ import org.evendraft.stability.Waterplane;
  */
 final class TargetSearch {
     private static final int MOST_NODES = 8000;
-    private static final int MOST_NODES_FOR_EXCESS = 1500;
+    private static final int MOST_NODES_FOR_EXCESS = 500;
+    private static final int MOST_NODES_WITHIN_EXCESS = 2000;
     private static final int MOST_CORRECTIONS = 8;
     private static final int MOST_APPROACHES = 12;
     /** When corrections change the cost by more than this part, the choices are searched anew. */
@@ -23,7 +24,7 @@ final class TargetSearch {
     /** An approach that gains less than this in weighted excess is the last. */
     private static final double LEAST_GAIN = 1e-6;
     /** How much more weighted excess than the least one the cheapest nearest plan may have: rounding. */
-    private static final double EXCESS_SPARE = 1e-4;
+    private static final double EXCESS_SPARE = 1e-3;
 
     private final Plant plant;
     private final PlanRequest request;
@@ -42,18 +43,24 @@ final class TargetSearch {
     private Optional<Found> meet() {
         TargetModel target =
                 new TargetModel(plant, Bands.atFaces(plant, request.target(), plant.stowage()), request.objective());
-        return corrected(target, new Goal.Cost(), Double.POSITIVE_INFINITY);
+        return corrected(target, new Goal.Cost(), Double.POSITIVE_INFINITY, Optional.empty());
     }
 
     /**
      * Solves, and corrects until the exact state is as good as the goal asks.
      *
-     * @param mostExcess weighted excess that is good enough besides none
+     * @param mostExcess weighted excess that is good enough; infinite when there must be none
+     * @param known a plan to correct by and to better
      */
-    private Optional<Found> corrected(TargetModel target, Goal goal, double mostExcess) {
+    private Optional<Found> corrected(TargetModel target, Goal goal, double mostExcess, Optional<Found> known) {
         boolean onTarget = Double.isInfinite(mostExcess);
-        double[] corrections = new double[target.size()];
-        Answer answer = Optimiser.solve(target.model(corrections), goal, MOST_NODES, List.of());
+        double[] corrections = known.map(
+                        found -> target.errors(found.plan(), found.end().state()))
+                .orElseGet(() -> new double[target.size()]);
+        List<List<Integer>> seeds =
+                known.map(found -> List.of(found.plan().choices())).orElse(List.of());
+        int nodes = onTarget ? MOST_NODES : MOST_NODES_WITHIN_EXCESS;
+        Answer answer = Optimiser.solve(target.model(corrections), goal, nodes, seeds);
         Optional<Optimum> plan = answer.best();
         double searchedCost = plan.map(Optimum::cost).orElse(0.0);
         for (int round = 0; round < MOST_CORRECTIONS && plan.isPresent(); round++) {
@@ -69,7 +76,7 @@ final class TargetSearch {
             List<Integer> choices = plan.get().choices();
             plan = Optimiser.complete(target.model(corrections), goal, choices);
             if (plan.isEmpty() || plan.get().cost() > searchedCost * (1 + COST_MOVED)) {
-                answer = Optimiser.solve(target.model(corrections), goal, MOST_NODES, List.of(choices));
+                answer = Optimiser.solve(target.model(corrections), goal, nodes, List.of(choices));
                 plan = answer.best();
                 searchedCost = plan.map(Optimum::cost).orElse(0.0);
             }
@@ -100,9 +107,9 @@ final class TargetSearch {
         if (best.isEmpty()) {
             return asItIs();
         }
-        double most = best.get().end().deviation().sum() * (1 + EXCESS_SPARE) + EXCESS_SPARE;
-        Optional<Found> cheapest =
-                corrected(modelNear(reference, bestPosition), new Goal.CostWithinExcess(most), most + EXCESS_SPARE);
+        double most = best.get().end().deviation().sum() + EXCESS_SPARE;
+        Optional<Found> cheapest = corrected(
+                modelNear(reference, bestPosition), new Goal.CostWithinExcess(most), most + EXCESS_SPARE, best);
         return cheapest.isPresent() ? cheapest : best;
     }
 

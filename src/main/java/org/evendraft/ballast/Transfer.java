@@ -77,13 +77,9 @@ record Transfer(String from, String to, double mass) {
         return pump.from().contains(from) && pump.to().contains(to);
     }
 
-    /** Equal parts of it. */
-    List<Transfer> inParts(int parts) {
-        List<Transfer> split = new ArrayList<>();
-        for (int i = 0; i < parts; i++) {
-            split.add(new Transfer(from, to, mass / parts));
-        }
-        return split;
+    /** One of a number of equal parts of it. */
+    Transfer part(int parts) {
+        return new Transfer(from, to, mass / parts);
     }
 
     /** Whether it works on a tank that another one works on. */

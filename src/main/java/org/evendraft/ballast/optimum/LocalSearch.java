@@ -6,10 +6,13 @@ import java.util.List;
 /** Betters a plan by leaving a tank out, giving a tank another choice, or letting one tank take the place of another. */
 final class LocalSearch {
     private static final int UNTOUCHED = 0;
+    /** How many neighbours are tried in one search, all starts together. */
+    private static final int MOST_TRIED = 2000;
 
     private final Program program;
     private final Completion completion;
     private final Incumbent incumbent;
+    private int tried;
 
     LocalSearch(Program program, Completion completion, Incumbent incumbent) {
         this.program = program;
@@ -20,7 +23,7 @@ final class LocalSearch {
     /** Goes on from the best plan until no neighbour is better. */
     void run() {
         boolean better = incumbent.best().isPresent();
-        while (better) {
+        while (better && tried < MOST_TRIED) {
             better = pass(incumbent.best().orElseThrow().choices());
         }
     }
@@ -49,13 +52,16 @@ final class LocalSearch {
         for (int c = 1; c < program.model().tanks().get(tank).choices().size(); c++) {
             List<Integer> changed = new ArrayList<>(choices);
             changed.set(out, UNTOUCHED);
-            changed.set(tank, c);
-            better |= incumbent.offer(completion.of(changed));
+            better |= attempt(changed, tank, c);
         }
         return better;
     }
 
     private boolean attempt(List<Integer> choices, int tank, int choice) {
+        if (tried >= MOST_TRIED) {
+            return false;
+        }
+        tried++;
         List<Integer> changed = new ArrayList<>(choices);
         changed.set(tank, choice);
         return incumbent.offer(completion.of(changed));

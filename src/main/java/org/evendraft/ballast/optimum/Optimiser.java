@@ -18,6 +18,7 @@ public final class Optimiser {
     private final Program program;
     private final Completion completion;
     private final Incumbent incumbent;
+    private final LocalSearch neighbours;
     private final int mostNodes;
     private final PriorityQueue<Node> open =
             new PriorityQueue<>(Comparator.comparingDouble(Node::bound).thenComparingInt(Node::number));
@@ -29,6 +30,7 @@ public final class Optimiser {
         this.program = new Program(model, goal);
         this.completion = new Completion(program);
         this.incumbent = new Incumbent(program);
+        this.neighbours = new LocalSearch(program, completion, incumbent);
         this.mostNodes = mostNodes;
     }
 
@@ -68,7 +70,7 @@ public final class Optimiser {
                 look(node);
             }
         }
-        new LocalSearch(program, completion, incumbent).run();
+        neighbours.run();
         return new Answer(incumbent.best(), bound(), nodes);
     }
 
@@ -95,7 +97,7 @@ public final class Optimiser {
         Node tight = relaxed.get().node;
         boolean better = incumbent.offer(completion.of(rounded(tight, reading)));
         if (better) {
-            new LocalSearch(program, completion, incumbent).run();
+            neighbours.run();
         }
         if (relaxed.get().optimal && reading.whole() && reading.trueToLines()) {
             incumbent.offer(completion.of(rounded(tight, reading)));

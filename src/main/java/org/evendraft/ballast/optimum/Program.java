@@ -14,6 +14,9 @@ final class Program {
     /** No excess is greater, in the row's unit times its weight. */
     private static final double GREATEST_EXCESS = 1e5;
 
+    /** A scaled row may be this far over its bound for rounding. */
+    private static final double SLIP = 1e-7;
+
     private final Model model;
     private final double costFactor;
     private final int tanks;
@@ -138,8 +141,6 @@ final class Program {
     double slip(int row) {
         return SLIP / scale[row];
     }
-
-    private static final double SLIP = 1e-7;
 
     /** The column of a tank at a point of a choice, moved by a pump. */
     Column column(int tank, int choice, Point point, int pump) {

@@ -4,13 +4,14 @@ import com.google.ortools.Loader;
 import com.google.ortools.linearsolver.MPConstraint;
 import com.google.ortools.linearsolver.MPObjective;
 import com.google.ortools.linearsolver.MPSolver;
+import com.google.ortools.linearsolver.MPSolverParameters;
 import com.google.ortools.linearsolver.MPVariable;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 
 /**
- * The same question put to a general solver (SCIP in OR-Tools) in another form: a switch for each segment of each line, and flows of
+ * The same question put to a general solver (HiGHS in OR-Tools) in another form: a switch for each segment of each line, and flows of
  * each tank through each pump bounded by those switches.
  */
 final class IndependentSolver {
@@ -28,7 +29,7 @@ final class IndependentSolver {
 
     private IndependentSolver(Model model) {
         this.model = model;
-        this.solver = MPSolver.createSolver("SCIP");
+        this.solver = MPSolver.createSolver("HIGHS");
         this.objective = solver.objective();
         this.effects = new MPConstraint[model.rows().size()];
         for (int r = 0; r < effects.length; r++) {
@@ -55,9 +56,8 @@ final class IndependentSolver {
             tank(tank);
         }
         objective.setMinimization();
-        com.google.ortools.linearsolver.MPSolverParameters parameters =
-                new com.google.ortools.linearsolver.MPSolverParameters();
-        parameters.setDoubleParam(com.google.ortools.linearsolver.MPSolverParameters.DoubleParam.RELATIVE_MIP_GAP, GAP);
+        MPSolverParameters parameters = new MPSolverParameters();
+        parameters.setDoubleParam(MPSolverParameters.DoubleParam.RELATIVE_MIP_GAP, GAP);
         MPSolver.ResultStatus status = solver.solve(parameters);
         OptionalDouble cost = switch (status) {
             case OPTIMAL -> OptionalDouble.of(objective.value());
@@ -88,7 +88,7 @@ final class IndependentSolver {
                 Point low = choice.points().get(i);
                 Point high = choice.points().get(Math.min(i + 1, choice.points().size() - 1));
                 MPVariable on = segment(choice, low, high, one, gain);
-                (high.amount() > 0 ? filling : drawing).add(on);
+                (low.amount() + high.amount() > 0 ? filling : drawing).add(on);
                 most = Math.max(most, Math.max(Math.abs(low.amount()), Math.abs(high.amount())));
             }
         }

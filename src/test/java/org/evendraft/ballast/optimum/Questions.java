@@ -16,9 +16,12 @@ final class Questions {
     private final Random random;
     private final int tanks;
     private final int pumps;
+    private final double breadth;
 
-    Questions(long seed, int tanks, int pumps) {
+    /** @param breadth how many times the usual tolerance the bands have */
+    Questions(long seed, int tanks, int pumps, double breadth) {
         this.random = new Random(seed);
+        this.breadth = breadth;
         this.tanks = tanks;
         this.pumps = pumps;
     }
@@ -47,7 +50,8 @@ final class Questions {
         return rows;
     }
 
-    private static void band(List<Model.Row> rows, double middle, double tolerance) {
+    private void band(List<Model.Row> rows, double middle, double usual) {
+        double tolerance = breadth * usual;
         rows.add(new Model.Row(middle + tolerance, 1 / tolerance));
         rows.add(new Model.Row(tolerance - middle, 1 / tolerance));
     }
@@ -91,7 +95,7 @@ final class Questions {
 
     /** Effects along a tank: linear but for the metacentric height, where the centroid rises and the surface comes and goes. */
     private record Line(double x, double y, double full, double start, double height, double surface) {
-        private static final int SEGMENTS = 4;
+        private static final int SEGMENTS = 3;
         private static final double MASS = 35_000;
 
         double least() {
@@ -114,7 +118,7 @@ final class Questions {
             List<Point> points = new ArrayList<>();
             int segments = to > from ? SEGMENTS : 0;
             for (int i = 0; i <= segments; i++) {
-                double mass = segments == 0 ? from : from + (to - from) * i / segments;
+                double mass = i == segments ? to : from + (to - from) * i / segments;
                 points.add(new Point(mass - start, effects(mass, kind)));
             }
             choices.add(new Choice(kind, cost, points));

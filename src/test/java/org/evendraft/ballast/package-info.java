@@ -1,0 +1,5 @@
+/** Tests of ballast plans. */
+@NullMarked
+package org.evendraft.ballast;
+
+import org.jspecify.annotations.NullMarked;
