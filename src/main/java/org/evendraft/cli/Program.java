@@ -43,6 +43,7 @@ public final class Program {
                 .addSubcommand(new EvaluateCommand(launcher, console))
                 .addSubcommand(new PlanCommand(launcher, console))
                 .addSubcommand(new HydrostaticsCommand(console))
+                .addSubcommand(new RightingCommand(launcher, console))
                 .addSubcommand(new MeshCommand(console))
                 .addSubcommand(new CommandLine.HelpCommand());
         line.getCommandSpec().version("evendraft " + launcher.version());

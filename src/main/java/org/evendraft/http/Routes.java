@@ -18,6 +18,7 @@ final class Routes {
                         new TankRoutes(room, writes).routes(),
                         new TableRoutes(room, writes).routes(),
                         new ConditionRoutes(room, writes).routes(),
+                        new RightingRoutes(room, writes).routes(),
                         new PlanRoutes(room, writes).routes())
                 .flatMap(List::stream)
                 .toList();

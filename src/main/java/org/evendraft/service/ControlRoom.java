@@ -24,6 +24,7 @@ public final class ControlRoom {
     private final TankTableFile tankTableFile;
     private final MakePlan makePlan;
     private final ReadPlans readPlans;
+    private final ComputeRighting computeRighting;
     private final CheckHealth checkHealth;
 
     /**
@@ -52,6 +53,7 @@ public final class ControlRoom {
         PlanRepository plans = new PlanRepository(clock, ids);
         this.makePlan = new MakePlan(shelf, readConditions, plans, source);
         this.readPlans = new ReadPlans(database, readConditions, plans);
+        this.computeRighting = new ComputeRighting(shelf, evaluateCondition, readConditions, source);
         this.checkHealth = new CheckHealth(database, engineVersion);
     }
 
@@ -118,6 +120,11 @@ public final class ControlRoom {
     /** Reads plans. */
     public ReadPlans readPlans() {
         return readPlans;
+    }
+
+    /** Computes righting arms. */
+    public ComputeRighting computeRighting() {
+        return computeRighting;
     }
 
     /** Checks health. */

@@ -77,6 +77,13 @@ record EnergyAtSlopes(double value, Slopes gradient, double byHeelTwice, double 
         return new Slopes(Math.cos(angle), Math.sin(angle));
     }
 
+    /** Second derivative along a unit direction of the slopes (m). */
+    double curvatureAlong(Slopes u) {
+        return u.heel() * u.heel() * byHeelTwice
+                + 2 * u.heel() * u.trim() * byHeelAndTrim
+                + u.trim() * u.trim() * byTrimTwice;
+    }
+
     /** The Hessian's greater eigenvalue (m). */
     double greatestCurvature() {
         return (byHeelTwice + byTrimTwice) / 2 + Math.hypot((byHeelTwice - byTrimTwice) / 2, byHeelAndTrim);

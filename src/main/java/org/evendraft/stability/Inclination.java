@@ -72,17 +72,24 @@ final class Inclination {
         return energy;
     }
 
+    Waterplane waterplane() {
+        return new Waterplane(hull.plane().origin().z(), Math.atan(slopes.heel()), Math.atan(slopes.trim()));
+    }
+
+    /** From B to G (m). */
+    Vec3 gravityOverBuoyancy() {
+        return gravity.minus(hull.centroid());
+    }
+
     /** Distance of G from the vertical through B (m). */
     double arm() {
-        Vec3 d = gravity.minus(hull.centroid());
+        Vec3 d = gravityOverBuoyancy();
         Vec3 n = hull.plane().normal();
         return d.minus(n.times(d.dot(n))).norm();
     }
 
     Afloat afloat() {
-        Waterplane waterplane =
-                new Waterplane(hull.plane().origin().z(), Math.atan(slopes.heel()), Math.atan(slopes.trim()));
         boolean stable = energy.leastCurvature() > 0;
-        return new Afloat(waterplane, hull.volume(), hull.centroid(), gravity, stable, arm());
+        return new Afloat(waterplane(), hull.volume(), hull.centroid(), gravity, stable, arm());
     }
 }

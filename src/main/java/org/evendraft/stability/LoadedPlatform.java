@@ -93,6 +93,21 @@ public final class LoadedPlatform {
         return new LoadedPlatform(prepared, waterDensity, freeSurface, fixedMass, fixedMoment, changed);
     }
 
+    /** The same with every liquid held as on even keel and G raised by the free-surface correction about a horizontal axis. */
+    LoadedPlatform atRest(double azimuthRad, FreeSurface which) {
+        SecondMoments moments = tanks.stream()
+                .map(tank -> tank.freeSurfaceMoments(which))
+                .reduce(SecondMoments.NONE, SecondMoments::plus);
+        double cos = Math.cos(azimuthRad);
+        double sin = Math.sin(azimuthRad);
+        double aboutAxis = cos * cos * moments.transverse()
+                - 2 * sin * cos * moments.product()
+                + sin * sin * moments.longitudinal();
+        double mass = mass();
+        Vec3 moment = centreOfGravity().times(mass).plus(new Vec3(0, 0, aboutAxis));
+        return new LoadedPlatform(prepared, waterDensity, freeSurface, mass, moment, List.of());
+    }
+
     /** The platform. */
     public PreparedPlatform prepared() {
         return prepared;

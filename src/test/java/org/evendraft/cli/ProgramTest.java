@@ -75,6 +75,22 @@ class ProgramTest {
         assertThat(row.path("heelAngle").doubleValue()).isCloseTo(1.5, within(1e-12));
     }
 
+    /** Wall-sided formula by hand: 100 × 20 m at 3 m, KB 1.5, BM 400/36, KG 5 m. */
+    @Test
+    void rightingPrintsACurve() throws IOException {
+        String condition = file("c.json", "{ \"name\": \"light\" }");
+        String platform = file("p.json", PLATFORM);
+        assertThat(run("righting", "--platform", platform, "--condition", condition, "--azimuth", "0", "--to", "10"))
+                .isZero();
+        double bm = 400 / 36.0;
+        double phi = Math.toRadians(10);
+        double arm = Math.sin(phi) * (1.5 + bm - 5 + bm / 2 * Math.pow(Math.tan(phi), 2));
+        assertThat(json(out()).path("points").path(10).path("gz").doubleValue()).isCloseTo(arm, within(1e-7));
+        assertThat(run("righting", "--platform", platform, "--condition", condition, "--azimuth", "0", "--to", "99"))
+                .isEqualTo(2);
+        assertThat(err()).contains("at most 80");
+    }
+
     @Test
     void faultsOfAFileAreAProblemOnStandardErrorWithStatusTwo() throws IOException {
         String condition = file("c.json", "{ \"mode\": \"ghost\", \"fills\": [ { \"tank\": \"T\", \"level\": 1 } ] }");

@@ -1,0 +1,81 @@
+package org.evendraft.stability;
+
+import java.util.Optional;
+import org.evendraft.geometry.Plane;
+import org.evendraft.geometry.Vec3;
+
+/**
+ * The way of a platform that is turned about the horizontal axis a = (cos A, sin A, 0) with displacement kept and, unless fixed, the
+ * trim about the perpendicular b = (−sin A, cos A, 0) at rest. With φ = tan(angle) and τ = tan(trim) the waterplane's normal is
+ * ∝ −τ·a + φ·b + z. The trim rests where the energy is least over τ: there (G − B) has no part along a seen in the waterplane.
+ */
+final class HeelPath {
+    private static final int MOST_STEPS = 60;
+    private static final double LONGEST_STEP = 0.1;
+    /** Arm about the perpendicular axis under which the trim is at rest (m). */
+    private static final double TRIM_TOLERANCE = 1e-9;
+
+    private final Slopes alongHeel;
+    private final Slopes alongTrim;
+    private final Vec3 axis;
+    private final boolean freeTrim;
+
+    HeelPath(double azimuthRad, boolean freeTrim) {
+        double cos = Math.cos(azimuthRad);
+        double sin = Math.sin(azimuthRad);
+        this.alongHeel = new Slopes(cos, sin);
+        this.alongTrim = new Slopes(-sin, cos);
+        this.axis = new Vec3(cos, sin, 0);
+        this.freeTrim = freeTrim;
+    }
+
+    /**
+     * The platform at an angle, from a neighbouring state.
+     *
+     * @param near where the search for the trim starts
+     * @param angleRad inclination about the axis (rad)
+     * @return empty where the trim has no stable rest within reach
+     */
+    Optional<Inclination> at(Inclination near, double angleRad) {
+        double phi = Math.tan(angleRad);
+        double tau = freeTrim ? near.slopes().dot(alongTrim) : 0;
+        Inclination here = near.at(slopes(phi, tau));
+        for (int i = 0; freeTrim && i < MOST_STEPS; i++) {
+            double slope = here.energy().gradient().dot(alongTrim);
+            double curvature = here.energy().curvatureAlong(alongTrim);
+            if (Math.abs(slope) <= TRIM_TOLERANCE) {
+                return curvature > 0 ? Optional.of(here) : Optional.empty();
+            }
+            double step = curvature > 0 ? -slope / curvature : -Math.signum(slope) * LONGEST_STEP;
+            tau += Math.max(-LONGEST_STEP, Math.min(LONGEST_STEP, step));
+            here = near.at(slopes(phi, tau));
+            if (here.slopes().inclination() > GREATEST) {
+                return Optional.empty();
+            }
+        }
+        return freeTrim ? Optional.empty() : Optional.of(here);
+    }
+
+    /** Inclinations beyond this are not followed (rad). */
+    static final double GREATEST = Math.toRadians(85);
+
+    private Slopes slopes(double phi, double tau) {
+        return alongHeel.times(phi).plus(alongTrim.times(tau));
+    }
+
+    /** The righting arm (G − B)·(n × e), e the axis seen in the waterplane (m). */
+    double arm(Inclination at) {
+        Plane plane = at.waterplane().plane();
+        Vec3 n = plane.normal();
+        Vec3 e = axis.minus(n.times(axis.dot(n))).unit();
+        return at.gravityOverBuoyancy().dot(n.cross(e));
+    }
+
+    RightingPoint point(Inclination at, double angleRad) {
+        return new RightingPoint(
+                Math.toDegrees(angleRad),
+                arm(at),
+                at.waterplane().draft(),
+                Math.toDegrees(Math.atan(at.slopes().dot(alongTrim))));
+    }
+}
