@@ -9,6 +9,8 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Map;
 import java.util.Random;
+import java.util.Set;
+import java.util.TreeMap;
 import java.util.concurrent.ConcurrentHashMap;
 import java.util.concurrent.CountDownLatch;
 import java.util.concurrent.ExecutorService;
@@ -45,6 +47,9 @@ class DurabilityIT {
     /** Ids of conditions whose storing was acknowledged, with their names. */
     private final Map<String, String> acknowledged = new ConcurrentHashMap<>();
 
+    /** Those of them that are not yet checked. */
+    private final Set<String> latest = ConcurrentHashMap.newKeySet();
+
     private final AtomicInteger sent = new AtomicInteger();
     private final Random random = new Random(SEED);
 
@@ -59,6 +64,7 @@ class DurabilityIT {
                 killWhileStarting();
             } else {
                 Jar.Service service = Jar.serve(directory, Map.of());
+                checkLatest(kill, new Client(service.address()));
                 killWhileStoring(service);
             }
         }
@@ -99,7 +105,9 @@ class DurabilityIT {
                         "{ \"name\": \"" + name + "\", \"fills\": [ { \"tank\": \"T\", \"fraction\": 0.5 } ] }";
                 HttpResponse<String> answer = client.post(CONDITIONS, document);
                 if (answer.statusCode() == 201) {
-                    acknowledged.put(Client.json(answer).path("id").textValue(), name);
+                    String id = Client.json(answer).path("id").textValue();
+                    acknowledged.put(id, name);
+                    latest.add(id);
                     oneIsStored.countDown();
                 }
             }
@@ -108,6 +116,16 @@ class DurabilityIT {
         } catch (InterruptedException e) {
             throw new IllegalStateException(e);
         }
+    }
+
+    /** The conditions of the latest round; told at once, so that whoever looks for the cause knows after which kill. */
+    private void checkLatest(int kill, Client client) throws IOException, InterruptedException {
+        for (String id : latest) {
+            assertThat(client.get(CONDITIONS + "/" + id + "/result").statusCode())
+                    .as("%s, acknowledged before kill %d", acknowledged.get(id), kill - 1)
+                    .isEqualTo(200);
+        }
+        latest.clear();
     }
 
     private void checkAll(Client client) throws Exception {
@@ -121,6 +139,9 @@ class DurabilityIT {
                             stored.put(c.path("id").textValue(), c.path("name").textValue()));
         }
         assertThat(acknowledged).hasSizeGreaterThan(KILLS);
+        Map<String, String> lost = new TreeMap<>(acknowledged);
+        lost.keySet().removeAll(stored.keySet());
+        assertThat(lost).as("acknowledged and lost").isEmpty();
         assertThat(stored).containsAllEntriesOf(acknowledged).hasSizeLessThanOrEqualTo(sent.get());
         for (String id : stored.keySet()) {
             HttpResponse<String> result = client.get(CONDITIONS + "/" + id + "/result");
