@@ -3,6 +3,7 @@ package org.evendraft.service;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.time.Clock;
 import java.time.Instant;
+import java.time.temporal.ChronoUnit;
 import java.util.ArrayList;
 import java.util.List;
 import org.evendraft.platform.Faults;
@@ -65,11 +66,12 @@ public final class RecordSoundings {
         Fields fields = Fields.of(document, "", faults);
         String source = fields.text(SOURCE, "unknown");
         List<Sounding> read = new ArrayList<>();
+        Instant now = clock.instant().truncatedTo(ChronoUnit.MILLIS);
         int i = 0;
         for (Fields reading : fields.someObjects(READINGS)) {
             SoundingReader reader = new SoundingReader(
                     platform, reading, document.path(READINGS).path(i++));
-            reader.read(source, clock.instant()).ifPresent(read::add);
+            reader.read(source, now).ifPresent(read::add);
         }
         fields.noOthers();
         faults.throwIfAny();

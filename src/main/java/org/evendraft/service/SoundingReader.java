@@ -6,6 +6,7 @@ import java.time.DateTimeException;
 import java.time.Duration;
 import java.time.Instant;
 import java.time.OffsetDateTime;
+import java.time.temporal.ChronoUnit;
 import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
@@ -61,7 +62,8 @@ final class SoundingReader {
 
     private Optional<Instant> at(String text, Instant now) {
         try {
-            Instant at = OffsetDateTime.parse(text).toInstant();
+            // No database keeps more than microseconds: what is answered is what is kept.
+            Instant at = OffsetDateTime.parse(text).toInstant().truncatedTo(ChronoUnit.MICROS);
             if (at.isAfter(now.plus(CLOCKS_APART))) {
                 fields.meaning("at", "at is in the future: " + text + " is after " + now);
             }
