@@ -83,12 +83,13 @@ class CommandsIT {
 
     @Test
     void serveSaysOneLineLogsJsonAndStopsGracefully() throws Exception {
-        Jar.Service service = Jar.serve(directory, Map.of("EVENDRAFT_LOG_FORMAT", "json"));
-        assertThat(new Client(service.address()).get("/health").statusCode()).isEqualTo(200);
-        int status = service.stop();
-        // 128 + 15: ended by SIGTERM, after what had to be done at the end
-        assertThat(status).isEqualTo(143);
-        assertThat(service.rest()).isEmpty();
+        try (Jar.Service service = Jar.serve(directory, Map.of("EVENDRAFT_LOG_FORMAT", "json"))) {
+            assertThat(new Client(service.address()).get("/health").statusCode())
+                    .isEqualTo(200);
+            // 128 + 15: ended by SIGTERM, after what had to be done at the end
+            assertThat(service.stop()).isEqualTo(143);
+            assertThat(service.rest()).isEmpty();
+        }
         List<String> lines = Files.readAllLines(directory.resolve("err.txt"));
         assertThat(lines)
                 .isNotEmpty()
@@ -111,18 +112,16 @@ class CommandsIT {
 
     @Test
     void anAddressOrADataFileThatIsTakenIsToldInASentence() throws Exception {
-        Jar.Service service = Jar.serve(directory, Map.of());
-        String port = service.address().substring(service.address().lastIndexOf(':') + 1);
-        Path other = Files.createDirectory(directory.resolve("other"));
-        Jar.Outcome address = Jar.run(other, Map.of("EVENDRAFT_HTTP_PORT", port), "serve");
-        assertThat(address.status()).isEqualTo(2);
-        assertThat(json(address.err()).path("detail").textValue()).contains("EVENDRAFT_HTTP_PORT");
-        Jar.Outcome data = Jar.run(
-                other,
-                Map.of("EVENDRAFT_DATABASE_URL", "jdbc:h2:file:" + directory.resolve("data/evendraft")),
-                "serve");
-        service.kill();
-        assertThat(data.status()).isEqualTo(2);
-        assertThat(json(data.err()).path("detail").textValue()).contains("cannot be opened");
+        try (Jar.Service service = Jar.serve(directory, Map.of())) {
+            String port = service.address().substring(service.address().lastIndexOf(':') + 1);
+            Path other = Files.createDirectory(directory.resolve("other"));
+            Jar.Outcome address = Jar.run(other, Map.of("EVENDRAFT_HTTP_PORT", port), "serve");
+            assertThat(address.status()).isEqualTo(2);
+            assertThat(json(address.err()).path("detail").textValue()).contains("EVENDRAFT_HTTP_PORT");
+            String taken = "jdbc:h2:file:" + directory.resolve("data/evendraft");
+            Jar.Outcome data = Jar.run(other, Map.of("EVENDRAFT_DATABASE_URL", taken), "serve");
+            assertThat(data.status()).isEqualTo(2);
+            assertThat(json(data.err()).path("detail").textValue()).contains("cannot be opened");
+        }
     }
 }

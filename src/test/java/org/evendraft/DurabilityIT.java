@@ -55,24 +55,22 @@ class DurabilityIT {
 
     @Test
     void everyAcknowledgedConditionSurvivesKillsAndNoneIsHalfWritten() throws Exception {
-        Jar.Service first = Jar.serve(directory, Map.of());
-        assertThat(new Client(first.address()).put(PLATFORM, DOCUMENT).statusCode())
-                .isEqualTo(201);
-        first.kill();
+        try (Jar.Service first = Jar.serve(directory, Map.of())) {
+            assertThat(new Client(first.address()).put(PLATFORM, DOCUMENT).statusCode())
+                    .isEqualTo(201);
+        }
         for (int kill = 1; kill < KILLS; kill++) {
             if (kill % START_UP_KILL == 0) {
                 killWhileStarting();
             } else {
-                Jar.Service service = Jar.serve(directory, Map.of());
-                checkLatest(kill, new Client(service.address()));
-                killWhileStoring(service);
+                try (Jar.Service service = Jar.serve(directory, Map.of())) {
+                    checkLatest(kill, new Client(service.address()));
+                    killWhileStoring(service);
+                }
             }
         }
-        Jar.Service last = Jar.serve(directory, Map.of());
-        try {
+        try (Jar.Service last = Jar.serve(directory, Map.of())) {
             checkAll(new Client(last.address()));
-        } finally {
-            last.kill();
         }
     }
 

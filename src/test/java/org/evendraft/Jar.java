@@ -37,12 +37,18 @@ final class Jar {
      * @param process its process
      * @param address where it listens
      */
-    record Service(Process process, String address) {
+    record Service(Process process, String address) implements AutoCloseable {
 
         /** Ends it with SIGKILL. */
         void kill() {
             process.destroyForcibly();
             ended();
+        }
+
+        /** Ends it whatever became of the test. */
+        @Override
+        public void close() {
+            kill();
         }
 
         /** Asks it to end with SIGTERM; the exit status. */
