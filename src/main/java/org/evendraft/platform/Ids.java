@@ -6,7 +6,8 @@ import java.util.regex.Pattern;
 
 /** The ids of one kind of thing, each given once. */
 final class Ids {
-    private static final Pattern FORM = Pattern.compile("[A-Za-z0-9._-]{1,64}");
+    /** The first character is none of the marks: an id is a part of addresses, where {@code .} and {@code ..} mean something else. */
+    private static final Pattern FORM = Pattern.compile("[A-Za-z0-9][A-Za-z0-9._-]{0,63}");
 
     private final String kind;
     private final Set<String> taken = new HashSet<>();
@@ -35,7 +36,9 @@ final class Ids {
                 && !id.isEmpty()
                 && !FORM.matcher(id).matches()) {
             fields.form(
-                    "id", "id must be 1 to 64 letters, digits, dots, hyphens or underscores, not " + Words.quote(id));
+                    "id",
+                    "id must be 1 to 64 letters, digits, dots, hyphens or underscores, the first of them a letter or a digit, not "
+                            + Words.quote(id));
             return "";
         }
         return id;

@@ -2,16 +2,21 @@ package org.evendraft.platform;
 
 import java.util.ArrayList;
 import java.util.HashSet;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Set;
 
 /** Reads the pumps of a platform. */
 final class PumpReader {
-    private final Set<String> tanks;
+    /** The sea, then the tanks; one wrongly called the sea as well is not told twice. */
+    private final Set<String> known = new LinkedHashSet<>();
+
     private final Ids ids = new Ids("pump");
 
     private PumpReader(Set<String> tanks) {
-        this.tanks = tanks;
+        known.add(Pump.SEA);
+        known.addAll(tanks);
+        known.remove(""); // a tank whose id has a fault
     }
 
     /**
@@ -53,12 +58,8 @@ final class PumpReader {
         Set<String> seen = new HashSet<>();
         for (int i = 0; i < ends.size(); i++) {
             String end = ends.get(i);
-            if (!end.isBlank() && !end.equals(Pump.SEA) && !tanks.contains(end)) {
-                at(
-                        fields,
-                        name,
-                        i,
-                        "there is no tank " + Words.quote(end) + "; known: " + Pump.SEA + ", " + Words.few(tanks));
+            if (!end.isBlank() && !known.contains(end)) {
+                at(fields, name, i, "there is no tank " + Words.quote(end) + "; known: " + Words.few(known));
             }
             if (!seen.add(end)) {
                 at(fields, name, i, Words.quote(end) + " is named twice");

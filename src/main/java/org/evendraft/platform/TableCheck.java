@@ -2,6 +2,7 @@ package org.evendraft.platform;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.ToDoubleFunction;
 import org.evendraft.geometry.SecondMoments;
 
 /** Whether rows make a calibration table. */
@@ -20,19 +21,20 @@ final class TableCheck {
      */
     record RowFault(int row, String column, String detail) {}
 
-    /** All that is wrong with the order and the sizes in a table whose numbers are each in range. */
+    /**
+     * All that is wrong with the order and the sizes in a table.
+     *
+     * @param rows its rows; what could not be read, or is out of its range, is not a number and has no further fault
+     */
     static List<RowFault> faults(List<TableRow> rows) {
         List<RowFault> faults = new ArrayList<>();
         if (rows.size() < 2) {
             faults.add(new RowFault(-1, "", "a table must have at least 2 rows, not " + rows.size()));
         }
+        rising(faults, "level", rows, TableRow::level);
+        rising(faults, "volume", rows, TableRow::volume);
         for (int i = 0; i < rows.size(); i++) {
-            TableRow row = rows.get(i);
-            if (i > 0) {
-                rising(faults, i, "level", rows.get(i - 1).level(), row.level());
-                rising(faults, i, "volume", rows.get(i - 1).volume(), row.volume());
-            }
-            SecondMoments s = row.surface();
+            SecondMoments s = rows.get(i).surface();
             double most = Math.sqrt(s.transverse() * s.longitudinal());
             if (Math.abs(s.product()) > most * (1 + PRINTED)) {
                 faults.add(new RowFault(
@@ -48,12 +50,20 @@ final class TableCheck {
         return faults;
     }
 
-    private static void rising(List<RowFault> faults, int i, String column, double before, double value) {
-        if (value <= before) {
-            faults.add(new RowFault(
-                    i,
-                    column,
-                    column + " must rise from row to row: " + Words.given(value) + " follows " + Words.given(before)));
+    /** A value is compared with the last one that is a number: whatever belongs between them, the two must rise. */
+    private static void rising(
+            List<RowFault> faults, String column, List<TableRow> rows, ToDoubleFunction<TableRow> read) {
+        double before = Double.NaN;
+        for (int i = 0; i < rows.size(); i++) {
+            double value = read.applyAsDouble(rows.get(i));
+            if (value <= before) {
+                faults.add(new RowFault(
+                        i,
+                        column,
+                        column + " must rise from row to row: " + Words.given(value) + " follows "
+                                + Words.given(before)));
+            }
+            before = Double.isNaN(value) ? before : value;
         }
     }
 }

@@ -47,8 +47,8 @@ final class TableCsv {
 
     static List<TableRow> read(byte[] utf8) {
         TableCsv csv = new TableCsv();
-        csv.readRecords(Json.text(utf8));
-        if (csv.faults.count() == 0) {
+        boolean whole = csv.readRecords(Json.text(utf8));
+        if (whole && csv.columns.keySet().containsAll(REQUIRED)) {
             TableCheck.faults(csv.rows).forEach(csv::place);
         }
         csv.faults.throwIfAny();
@@ -79,7 +79,8 @@ final class TableCsv {
         return CSVFormat.RFC4180.format(values) + CSVFormat.RFC4180.getRecordSeparator();
     }
 
-    private void readRecords(String text) {
+    /** Reads all lines; false when they do not end as CSV must, so that rows may be missing. */
+    private boolean readRecords(String text) {
         long line = 1;
         try (CSVParser parser = CSVParser.parse(text, CSVFormat.RFC4180)) {
             for (CSVRecord next : parser) {
@@ -92,10 +93,12 @@ final class TableCsv {
             }
         } catch (IOException | UncheckedIOException e) {
             faults.form("", "line " + line + ": not CSV by RFC 4180; is a quotation mark missing?");
+            return false;
         }
         if (line == 1 && faults.count() == 0) {
             faults.form("", "the table is empty; the first line must name the columns " + String.join(", ", REQUIRED));
         }
+        return true;
     }
 
     private void readHeader(CSVRecord header) {
@@ -142,16 +145,18 @@ final class TableCsv {
         }
         String pointer = "/" + rows.size() + "/" + column;
         String start = "line " + lines.get(rows.size()) + ": " + column;
+        Range range = RANGES.getOrDefault(column, Range.ANY);
         OptionalDouble value = Words.number(next.get(i).strip());
         if (value.isEmpty()) {
             faults.form(pointer, start + " must be a finite number, not " + Words.quote(next.get(i)));
-        } else if (!RANGES.getOrDefault(column, Range.ANY).allows(value.getAsDouble())) {
-            faults.meaning(
-                    pointer,
-                    start + " must be " + RANGES.getOrDefault(column, Range.ANY).words() + ", not "
-                            + Words.given(value.getAsDouble()));
+            return Double.NaN;
         }
-        return value.orElse(Double.NaN);
+        double number = value.getAsDouble();
+        if (!range.allows(number)) {
+            faults.meaning(pointer, start + " must be " + range.words() + ", not " + Words.given(number));
+            return Double.NaN;
+        }
+        return number;
     }
 
     private void place(TableCheck.RowFault fault) {

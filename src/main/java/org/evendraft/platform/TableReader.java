@@ -1,5 +1,6 @@
 package org.evendraft.platform;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.List;
 import org.evendraft.geometry.SecondMoments;
@@ -19,7 +20,7 @@ final class TableReader {
         for (Fields row : fields.objects("table")) {
             rows.add(row(row));
         }
-        if (faults.count() == before) {
+        if (fields.value("table").filter(JsonNode::isArray).isPresent()) {
             TableCheck.faults(rows).forEach(fault -> faults.meaning(place(fields, fault), fault.detail()));
         }
         return faults.count() == before ? rows : List.of();

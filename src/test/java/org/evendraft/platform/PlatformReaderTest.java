@@ -2,6 +2,7 @@ package org.evendraft.platform;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.catchThrowableOfType;
+import static org.assertj.core.api.Assertions.tuple;
 import static org.assertj.core.api.Assertions.within;
 
 import com.fasterxml.jackson.core.JsonPointer;
@@ -87,6 +88,12 @@ class PlatformReaderTest {
             value = {
                 "/id | 'a b' | FORM",
                 "/id | '' | FORM",
+                "/id | \".\" | FORM",
+                "/id | \"..\" | FORM",
+                "/tanks/0/id | \"..\" | FORM",
+                "/tanks/0/id | \"-B1\" | FORM",
+                "/pumps/0/id | \"_P\" | FORM",
+                "/modes/0/id | \".work\" | FORM",
                 "/id | 7 | FORM",
                 "/waterDensity | 0 | MEANING",
                 "/waterDensity | -1.025 | MEANING",
@@ -202,6 +209,47 @@ class PlatformReaderTest {
             assertThat(fault.pointer()).isEqualTo("/tanks/2/table/2/volume");
             assertThat(fault.detail()).contains("400 m³", "390 m³");
         });
+    }
+
+    @Test
+    void tellsThatAnIdStartsWithALetterOrADigit() {
+        ObjectNode document = with(Examples.platform(), "/id", Examples.parse("\"..\""));
+        assertThat(faults(document))
+                .singleElement()
+                .satisfies(fault -> assertThat(fault.detail())
+                        .isEqualTo("id must be 1 to 64 letters, digits, dots, hyphens or underscores, "
+                                + "the first of them a letter or a digit, not '..'"));
+        assertThat(PlatformReader.read(with(Examples.platform(), "/id", Examples.parse("\"7_a.-\"")))
+                        .platform()
+                        .id())
+                .isEqualTo("7_a.-");
+    }
+
+    @Test
+    void listsATableThatGoesBackwardsTogetherWithItsNegativeValues() {
+        ObjectNode document = Examples.platform();
+        with(document, "/tanks/2/table/0/inertiaT", Examples.parse("-1"));
+        with(document, "/tanks/2/table/1/volume", Examples.parse("-200"));
+        with(document, "/tanks/2/table/2/level", Examples.parse("1"));
+        with(document, "/tanks/2/table/0/volume", Examples.parse("500"));
+        assertThat(faults(document))
+                .extracting(Fault::pointer, Fault::detail)
+                .containsExactlyInAnyOrder(
+                        tuple("/tanks/2/table/0/inertiaT", "inertiaT must be 0 or more, not -1"),
+                        tuple("/tanks/2/table/1/volume", "volume must be 0 or more, not -200"),
+                        tuple("/tanks/2/table/2/level", "level must rise from row to row: 1 follows 2"),
+                        tuple("/tanks/2/table/2/volume", "volume must rise from row to row: 400 follows 500"));
+    }
+
+    @Test
+    void tellsTheKnownEndsOfAPumpOnceEach() {
+        ObjectNode document = Examples.platform();
+        with(document, "/tanks/0/id", Examples.parse("\"sea\""));
+        with(document, "/tanks/2/id", Examples.parse("\"F 1\""));
+        assertThat(faults(document))
+                .filteredOn(fault -> fault.pointer().equals("/pumps/0/from/0"))
+                .extracting(Fault::detail)
+                .containsExactly("there is no tank 'B1'; known: sea, B2");
     }
 
     @Test

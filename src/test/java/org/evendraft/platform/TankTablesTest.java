@@ -80,6 +80,12 @@ class TankTablesTest {
         assertThat(faults(HEADER + "0,x,1,2,0,10,20,1\r\n1,y,1,2,0,10,20,1\r\n"))
                 .extracting(Fault::pointer)
                 .containsExactly("/0/volume", "/1/volume");
+        assertThat(faults(HEADER + TWO_ROWS + "2,-1,1,2,2,10,20,1\r\n5,90,1,2,2,10,20,1\r\n"))
+                .extracting(Fault::detail)
+                .containsExactlyInAnyOrder(
+                        "line 4: volume must be 0 or more, not -1",
+                        "line 4: level must rise from row to row: 2 follows 2.5",
+                        "line 5: volume must rise from row to row: 90 follows 100");
         assertThat(faults("level,volume,level,depth\r\n"))
                 .extracting(Fault::detail)
                 .anyMatch(d -> d.contains("'depth'"))
