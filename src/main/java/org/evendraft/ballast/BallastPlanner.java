@@ -3,6 +3,7 @@ package org.evendraft.ballast;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.stream.Stream;
 import org.evendraft.ballast.Plan.Optimality;
 import org.evendraft.platform.Condition;
 import org.evendraft.platform.FaultyDocumentException;
@@ -52,7 +53,7 @@ public final class BallastPlanner {
                     + request.objective().touchPenalty() * fills.size()
                     + request.objective().slackPenalty() * slack;
             return new Plan(
-                    found.end().deviation().none(),
+                    found.end().deviation().none() && path.kept(),
                     moves(),
                     fills,
                     before,
@@ -64,7 +65,8 @@ public final class BallastPlanner {
                     schedule.duration(),
                     worst(),
                     optimality(cost),
-                    found.end().deviation().binding(),
+                    Stream.concat(found.end().deviation().binding().stream(), path.limitsPassed().stream())
+                            .toList(),
                     warnings(after),
                     Plan.CAUTION);
         }

@@ -2,6 +2,7 @@ package org.evendraft.ballast;
 
 import org.evendraft.platform.Calibration;
 import org.evendraft.platform.Tank;
+import org.evendraft.stability.TankState;
 
 /**
  * A ballast tank that a plan may move, with sea water in it.
@@ -49,7 +50,8 @@ record BallastTank(Tank tank, Calibration calibration, double density, double st
     }
 
     static boolean countsAsSlack(Tank tank, double fraction) {
-        return fraction > tank.leastPumpableFraction() * (1 + OVER) && fraction < tank.pressedUpFraction();
+        return fraction > tank.leastPumpableFraction() * (1 + OVER)
+                && TankState.of(fraction, tank.pressedUpFraction()) != TankState.PRESSED_UP;
     }
 
     /** The volume of a mass (m³). */
@@ -63,6 +65,6 @@ record BallastTank(Tank tank, Calibration calibration, double density, double st
     }
 
     Contents atStart() {
-        return at(start, start / full() >= tank.pressedUpFraction());
+        return at(start, TankState.of(start / full(), tank.pressedUpFraction()) == TankState.PRESSED_UP);
     }
 }

@@ -14,8 +14,8 @@ import org.evendraft.ballast.PlanRequest.Target;
  */
 record Deviation(List<Binding> binding, double sum) {
     private static final double GM_UNIT = 0.1;
-    /** An excess of less than this, in metres or degrees, is rounding. */
-    private static final double ROUNDING = 1e-9;
+    /** An excess of less than this part of its unit is rounding. */
+    private static final double ROUNDING = 1e-5;
 
     static Deviation of(Target target, ExactState state) {
         Collector collector = new Collector();
@@ -52,7 +52,7 @@ record Deviation(List<Binding> binding, double sum) {
         }
 
         private void add(String limit, double value, double bound, double lack, double unit) {
-            if (lack > ROUNDING) {
+            if (lack > ROUNDING * unit) {
                 binding.add(new Binding(limit, value, bound, lack));
                 sum += lack / unit;
             }

@@ -19,7 +19,10 @@ import org.evendraft.stability.LoadedPlatform;
  */
 final class Path {
     /** Samples between two instants. */
-    static final int CLOSE = 6;
+    static final int CLOSE = 20;
+
+    /** Just after and just before an instant: so small a part of the time between two that a tank has just begun to fill or to run dry. */
+    private static final double BESIDE = 1e-6;
 
     /** An excess of less than this, in degrees or metres, is rounding. */
     private static final double ROUNDING = 1e-9;
@@ -54,7 +57,8 @@ final class Path {
             double to = instants.get(i + 1);
             Set<String> moving = schedule.moving(from, to);
             for (int s = 0; s <= samples + 1; s++) {
-                path.look(from + (to - from) * s / (samples + 1), moving, limits);
+                double part = Math.min(1 - BESIDE, Math.max(BESIDE, s / (samples + 1.0)));
+                path.look(from + (to - from) * part, moving, limits);
             }
         }
         path.look(schedule.duration(), Set.of(), limits);
@@ -121,6 +125,27 @@ final class Path {
                         .filter(figure -> figure > ROUNDING)
                         .sum()
                 : Double.POSITIVE_INFINITY;
+    }
+
+    /** Whether the platform floats and every limit is kept at every instant looked at. */
+    boolean kept() {
+        return afloat() && limitsPassed().isEmpty();
+    }
+
+    /** The limits that are not kept. */
+    List<Plan.Binding> limitsPassed() {
+        List<Plan.Binding> passed = new ArrayList<>();
+        excesses.forEach((quantity, peak) -> {
+            if (peak.figure() > ROUNDING) {
+                double worst = peaks.getOrDefault(quantity, peak).figure();
+                passed.add(new Plan.Binding(
+                        "operationLimits." + quantity.limitName(),
+                        quantity.plain(worst),
+                        quantity.plain(worst - peak.figure()),
+                        peak.figure()));
+            }
+        });
+        return passed;
     }
 
     /** A sentence on each limit that is not kept. */

@@ -7,20 +7,22 @@ import org.evendraft.ballast.PlanRequest.OperationLimits;
 /** What is watched on the way: each as a figure that must stay at or under its limit. */
 enum Quantity {
     /** Greatest heel to either side (degrees). */
-    HEEL("heel", "°", 1),
+    HEEL("heel", "maxHeel", "°", 1),
     /** Greatest trim to either end (degrees). */
-    TRIM("trim", "°", 1),
+    TRIM("trim", "maxTrim", "°", 1),
     /** Least transverse metacentric height, counted negative (m). */
-    GM_TRANSVERSE("transverse GM", " m", -1),
+    GM_TRANSVERSE("transverse GM", "minGm.transverse", " m", -1),
     /** Least longitudinal metacentric height, counted negative (m). */
-    GM_LONGITUDINAL("longitudinal GM", " m", -1);
+    GM_LONGITUDINAL("longitudinal GM", "minGm.longitudinal", " m", -1);
 
     private final String words;
+    private final String limitName;
     private final String unit;
     private final int sign;
 
-    Quantity(String words, String unit, int sign) {
+    Quantity(String words, String limitName, String unit, int sign) {
         this.words = words;
+        this.limitName = limitName;
         this.unit = unit;
         this.sign = sign;
     }
@@ -49,6 +51,11 @@ enum Quantity {
     /** Its name for people. */
     String words() {
         return words;
+    }
+
+    /** Name of its limit in a request. */
+    String limitName() {
+        return limitName;
     }
 
     /** The figure as people read it. */

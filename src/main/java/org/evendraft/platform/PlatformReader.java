@@ -3,6 +3,7 @@ package org.evendraft.platform;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.LinkedHashSet;
 import java.util.List;
+import java.util.Locale;
 import java.util.Set;
 
 /** Reads a platform document, checks it as a whole, and prepares what is computed once from it. */
@@ -24,7 +25,24 @@ public final class PlatformReader {
         Platform platform = platform(Fields.of(document, "", faults));
         faults.throwIfAny();
         TankPlaces.warnings(platform.hull(), platform.tanks()).forEach(faults::warn);
-        return new PreparedPlatform(platform, faults.warnings());
+        PreparedPlatform prepared = new PreparedPlatform(platform, faults.warnings());
+        checkFloats(prepared);
+        return prepared;
+    }
+
+    private static void checkFloats(PreparedPlatform prepared) {
+        double buoyancy =
+                prepared.platform().waterDensity() * prepared.hull().volume();
+        double mass = prepared.platform().lightship().mass();
+        if (mass >= buoyancy) {
+            throw FaultyDocumentException.impossible(
+                    "",
+                    String.format(
+                            Locale.ROOT,
+                            "The platform sinks: its lightship of %.1f t is more than the %.1f t that its whole hull displaces.",
+                            mass,
+                            buoyancy));
+        }
     }
 
     private static Platform platform(Fields fields) {

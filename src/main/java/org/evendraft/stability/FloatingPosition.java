@@ -28,8 +28,8 @@ final class FloatingPosition {
     /** Slopes under this are none, when twins are compared. */
     private static final double SAME_SLOPE = 1e-6;
 
-    private static final double[] RINGS = {2, 8, 20, 35, 50};
-    private static final int DIRECTIONS = 16;
+    private static final double[] RINGS = {3, 15, 40};
+    private static final int DIRECTIONS = 12;
 
     private final LoadedPlatform platform;
 

@@ -6,11 +6,14 @@ public enum TankState {
     EMPTY,
     /** Partly filled, with a free surface. */
     SLACK,
-    /** At or over its pressed-up fraction: no free surface. */
+    /** At or over its pressed-up fraction, rounding forgiven: no free surface. */
     PRESSED_UP;
 
     /** A tank under this part of full is empty. */
     private static final double EMPTY_FRACTION = 1e-9;
+
+    /** A fraction so little under the pressed-up one is that one: a volume or mass in decimals seldom hits it exactly. */
+    private static final double ROUNDING = 1e-9;
 
     /**
      * The state of a tank at rest.
@@ -22,6 +25,6 @@ public enum TankState {
         if (fraction < EMPTY_FRACTION) {
             return EMPTY;
         }
-        return fraction >= pressedUpFraction ? PRESSED_UP : SLACK;
+        return fraction >= pressedUpFraction - ROUNDING ? PRESSED_UP : SLACK;
     }
 }

@@ -267,4 +267,16 @@ class PlatformReaderTest {
             assertThat(fault.kind()).isEqualTo(Fault.Kind.FORM);
         });
     }
+
+    @Test
+    void refusesAPlatformThatItsLightshipAloneSinks() {
+        ObjectNode platform = Examples.platform();
+        ((ObjectNode) platform.path("lightship")).put("mass", 9e6);
+        FaultyDocumentException e =
+                catchThrowableOfType(FaultyDocumentException.class, () -> PlatformReader.read(platform));
+        assertThat(e.faults()).singleElement().satisfies(fault -> {
+            assertThat(fault.pointer()).isEmpty();
+            assertThat(fault.detail()).contains("sinks").contains("9000000.0 t");
+        });
+    }
 }

@@ -150,6 +150,14 @@ class TankStatesTest {
         assertThat(evaluate(BOX, FULL * 0.9, FreeSurface.ACTUAL).warnings()).noneMatch(w -> w.contains("Tank T"));
     }
 
+    /** 0.98 of a volume in decimals is seldom 0.98 in binary: a billionth under it is still pressed up, a millionth is not. */
+    @Test
+    void roundingDoesNotMakeAPressedUpTankSlack() {
+        assertThat(TankState.of(Math.nextDown(0.98), 0.98)).isEqualTo(TankState.PRESSED_UP);
+        assertThat(TankState.of(Math.nextDown(1.0), 1)).isEqualTo(TankState.PRESSED_UP);
+        assertThat(TankState.of(0.98 - 1e-6, 0.98)).isEqualTo(TankState.SLACK);
+    }
+
     /** A tank that a pump works on counts as slack up to its brim, and not when empty. */
     @Test
     void aTankBeingMovedIsSlackWhateverItsLevel() {
