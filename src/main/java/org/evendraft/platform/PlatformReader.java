@@ -31,8 +31,7 @@ public final class PlatformReader {
     }
 
     private static void checkFloats(PreparedPlatform prepared) {
-        double buoyancy =
-                prepared.platform().waterDensity() * prepared.hull().volume();
+        double buoyancy = prepared.platform().waterDensity() * prepared.hull().volume();
         double mass = prepared.platform().lightship().mass();
         if (mass >= buoyancy) {
             throw FaultyDocumentException.impossible(
