@@ -29,9 +29,7 @@ final class BodyReader {
      */
     byte[] read(HttpServletRequest request) {
         long deadline = System.nanoTime() + time.toNanos();
-        boolean announced = request.getContentLengthLong() > most;
-        if (announced && request.getHeader("Expect") != null) {
-            // The client waits for leave to send; it gets the refusal instead.
+        if (request.getContentLengthLong() > most) {
             throw tooLarge();
         }
         try (InputStream in = request.getInputStream()) {
@@ -41,7 +39,7 @@ final class BodyReader {
                 if (System.nanoTime() > deadline) {
                     throw new Refusal(Reason.TOO_SLOW, "The body did not arrive within " + time.toSeconds() + " s.");
                 }
-                if (announced || out.size() + n > most) {
+                if (out.size() + n > most) {
                     drain(in, chunk, deadline);
                     throw tooLarge();
                 }

@@ -36,6 +36,7 @@ final class Failures {
         Answer answer = Answer.problem(Problem.of(refusal));
         return switch (refusal.reason()) {
             case UNAUTHORIZED -> answer.with("WWW-Authenticate", "Bearer");
+            case TOO_LARGE -> answer.with("Connection", "close"); // the rest of the body is not read
             case UNAVAILABLE -> answer.with("Retry-After", "5");
             default -> answer;
         };

@@ -108,6 +108,22 @@ class ServerTest {
     }
 
     @Test
+    void aBodyAnnouncedAsTooLargeIsRefusedBeforeAnyOfItComes() throws Exception {
+        try (TestService service = TestService.startWith(10_000, LONG);
+                Socket socket = new Socket(InetAddress.getLoopbackAddress(), service.port())) {
+            socket.setSoTimeout(10_000); // less than the time a body may take
+            String head = "POST " + Barge.PATH + "/evaluate HTTP/1.1\r\nHost: x\r\n"
+                    + "Content-Type: application/json\r\nContent-Length: 10001\r\n\r\n";
+            socket.getOutputStream().write(head.getBytes(StandardCharsets.US_ASCII));
+            String answer = new String(socket.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
+            assertThat(answer)
+                    .startsWith("HTTP/1.1 413")
+                    .containsIgnoringCase("Connection: close")
+                    .contains("application/problem+json", "10000 bytes");
+        }
+    }
+
+    @Test
     void aBodyOfExactlyTheGreatestSizeIsRead() {
         try (TestService service = TestService.startWith(10_000, LONG)) {
             Api api = Barge.stored(service);
