@@ -1,16 +1,11 @@
 package org.evendraft.cli;
 
-import java.nio.file.Path;
 import java.time.Clock;
 import java.util.concurrent.Callable;
-import org.evendraft.platform.Condition;
-import org.evendraft.platform.ConditionReader;
-import org.evendraft.platform.PlatformReader;
 import org.evendraft.service.EvaluateCondition;
-import org.evendraft.service.PlatformAtRevision;
 import org.evendraft.service.Provenance;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.Option;
+import picocli.CommandLine.Mixin;
 
 /** Evaluates a condition. */
 @Command(
@@ -25,11 +20,8 @@ final class EvaluateCommand implements Callable<Integer> {
     private final Launcher launcher;
     private final Console console;
 
-    @Option(names = "--platform", required = true, paramLabel = "P.json", description = "The platform's document.")
-    private Path platform = Path.of("");
-
-    @Option(names = "--condition", required = true, paramLabel = "C.json", description = "The condition's document.")
-    private Path condition = Path.of("");
+    @Mixin
+    private LoadingFiles files = new LoadingFiles();
 
     EvaluateCommand(Launcher launcher, Console console) {
         this.launcher = launcher;
@@ -38,10 +30,9 @@ final class EvaluateCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        PlatformAtRevision read = new PlatformAtRevision(0, InputFile.read(platform, PlatformReader::read));
-        Condition loading = InputFile.read(condition, json -> ConditionReader.read(json, read.prepared()));
+        LoadingFiles.Loading loading = files.read();
         Provenance.Source source = new Provenance.Source(Clock.systemUTC(), launcher.version());
-        console.answer(EvaluateCondition.evaluate(read, loading, source));
+        console.answer(EvaluateCondition.evaluate(loading.platform(), loading.condition(), source));
         return Console.DONE;
     }
 }

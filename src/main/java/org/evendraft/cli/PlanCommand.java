@@ -3,13 +3,10 @@ package org.evendraft.cli;
 import java.nio.file.Path;
 import java.time.Clock;
 import java.util.concurrent.Callable;
-import org.evendraft.platform.Condition;
-import org.evendraft.platform.ConditionReader;
-import org.evendraft.platform.PlatformReader;
 import org.evendraft.service.MakePlan;
-import org.evendraft.service.PlatformAtRevision;
 import org.evendraft.service.Provenance;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Makes a ballast plan. */
@@ -25,11 +22,8 @@ final class PlanCommand implements Callable<Integer> {
     private final Launcher launcher;
     private final Console console;
 
-    @Option(names = "--platform", required = true, paramLabel = "P.json", description = "The platform's document.")
-    private Path platform = Path.of("");
-
-    @Option(names = "--condition", required = true, paramLabel = "C.json", description = "The condition's document.")
-    private Path condition = Path.of("");
+    @Mixin
+    private LoadingFiles files = new LoadingFiles();
 
     @Option(names = "--request", required = true, paramLabel = "R.json", description = "The plan request.")
     private Path request = Path.of("");
@@ -41,10 +35,10 @@ final class PlanCommand implements Callable<Integer> {
 
     @Override
     public Integer call() {
-        PlatformAtRevision read = new PlatformAtRevision(0, InputFile.read(platform, PlatformReader::read));
-        Condition loading = InputFile.read(condition, json -> ConditionReader.read(json, read.prepared()));
+        LoadingFiles.Loading loading = files.read();
         Provenance.Source source = new Provenance.Source(Clock.systemUTC(), launcher.version());
-        MakePlan.TracedPlan plan = InputFile.read(request, json -> MakePlan.make(read, loading, json, source));
+        MakePlan.TracedPlan plan =
+                InputFile.read(request, json -> MakePlan.make(loading.platform(), loading.condition(), json, source));
         console.answer(plan);
         return plan.plan().feasible() ? Console.DONE : Console.CANNOT_BE_MET;
     }

@@ -1,17 +1,13 @@
 package org.evendraft.cli;
 
-import java.nio.file.Path;
 import java.time.Clock;
 import java.util.concurrent.Callable;
-import org.evendraft.platform.Condition;
-import org.evendraft.platform.ConditionReader;
-import org.evendraft.platform.PlatformReader;
 import org.evendraft.service.ComputeRighting;
-import org.evendraft.service.PlatformAtRevision;
 import org.evendraft.service.Provenance;
 import org.evendraft.stability.LiquidTreatment;
 import org.evendraft.stability.RightingCurve;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 
 /** Computes a curve of righting arms. */
@@ -27,11 +23,8 @@ final class RightingCommand implements Callable<Integer> {
     private final Launcher launcher;
     private final Console console;
 
-    @Option(names = "--platform", required = true, paramLabel = "P.json", description = "The platform's document.")
-    private Path platform = Path.of("");
-
-    @Option(names = "--condition", required = true, paramLabel = "C.json", description = "The condition's document.")
-    private Path condition = Path.of("");
+    @Mixin
+    private LoadingFiles files = new LoadingFiles();
 
     @Option(
             names = "--azimuth",
@@ -72,10 +65,9 @@ final class RightingCommand implements Callable<Integer> {
     @Override
     public Integer call() {
         RightingCurve.Request request = RightingCurve.Request.checked(azimuth, to, step, !fixedTrim, liquids);
-        PlatformAtRevision read = new PlatformAtRevision(0, InputFile.read(platform, PlatformReader::read));
-        Condition loading = InputFile.read(condition, json -> ConditionReader.read(json, read.prepared()));
+        LoadingFiles.Loading loading = files.read();
         Provenance.Source source = new Provenance.Source(Clock.systemUTC(), launcher.version());
-        console.answer(ComputeRighting.curve(read, loading, request, source));
+        console.answer(ComputeRighting.curve(loading.platform(), loading.condition(), request, source));
         return Console.DONE;
     }
 }

@@ -206,7 +206,7 @@ class ProgramTest {
 
                 @Override
                 public String listen() {
-                    throw new UnsupportedOperationException();
+                    throw new IllegalStateException("no test listens");
                 }
 
                 @Override

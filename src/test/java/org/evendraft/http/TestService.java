@@ -73,7 +73,7 @@ final class TestService implements AutoCloseable {
 
         @Override
         public Clock withZone(ZoneId zone) {
-            throw new UnsupportedOperationException();
+            throw new IllegalStateException("the service keeps UTC");
         }
 
         @Override
