@@ -6,7 +6,7 @@ import org.evendraft.stability.ConditionResult;
 /**
  * A ballast plan. Component names are those of the JSON answer.
  *
- * @param feasible whether the target is met
+ * @param feasible whether the target is met and every limit kept on the way
  * @param moves the pumping orders by step
  * @param fills contents at the end of every tank touched
  * @param before the condition as it is
@@ -18,7 +18,7 @@ import org.evendraft.stability.ConditionResult;
  * @param durationMinutes from the first start to the last end (min)
  * @param worst the worst on the way
  * @param optimality how good the plan is known to be
- * @param binding what keeps the target from being met; empty when it is met
+ * @param binding what keeps the target from being met, and limits passed on the way; empty when feasible
  * @param warnings sentences on what deserves attention
  * @param caution what the plan must not be taken for
  */
