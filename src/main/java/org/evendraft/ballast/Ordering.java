@@ -148,6 +148,7 @@ final class Ordering {
     /** Moves one transfer at a time to another place as long as that betters the estimate. */
     private List<Estimate> neighbours(List<Transfer> pieces) {
         List<Estimate> all = new ArrayList<>(estimates(pieces));
+        all.addAll(estimates(steadiest(pieces)));
         Estimate best = all.stream().min(Estimate.BEST_FIRST).orElseThrow();
         boolean better = true;
         while (better && all.size() < MOST_TRIED) {
@@ -167,6 +168,32 @@ final class Ordering {
             }
         }
         return all;
+    }
+
+    /** At each turn the transfer after which the platform lies most nearly upright. */
+    private List<Transfer> steadiest(List<Transfer> pieces) {
+        List<Transfer> waiting = new ArrayList<>(pieces);
+        List<Transfer> order = new ArrayList<>();
+        Map<String, Double> gained = new HashMap<>();
+        while (!waiting.isEmpty()) {
+            Transfer next = waiting.stream()
+                    .min(Comparator.comparingDouble(transfer -> slopeAfter(gained, transfer)))
+                    .orElseThrow();
+            waiting.remove(next);
+            order.add(next);
+            gained.merge(next.from(), -next.mass(), Double::sum);
+            gained.merge(next.to(), next.mass(), Double::sum);
+        }
+        return order;
+    }
+
+    private double slopeAfter(Map<String, Double> gained, Transfer transfer) {
+        Map<String, Double> then = new HashMap<>(gained);
+        then.merge(transfer.from(), -transfer.mass(), Double::sum);
+        then.merge(transfer.to(), transfer.mass(), Double::sum);
+        then.remove(Pump.SEA);
+        double[] moved = moved(then);
+        return Math.hypot(startHeel - moved[Response.SLOPE_Y], startTrim + moved[Response.SLOPE_X]);
     }
 
     /** An order by each rule. */

@@ -30,6 +30,18 @@ record Schedule(List<Run> runs) {
             return Math.min(1, Math.max(0, (minute - start) / (end - start)));
         }
 
+        private boolean continuesAs(Run next) {
+            return pump.equals(next.pump)
+                    && transfer.from().equals(next.transfer.from())
+                    && transfer.to().equals(next.transfer.to())
+                    && Math.abs(end - next.start) <= INSTANT;
+        }
+
+        private Run with(Run next) {
+            double mass = transfer.mass() + next.transfer.mass();
+            return new Run(new Transfer(transfer.from(), transfer.to(), mass), pump, start, next.end);
+        }
+
         /** Whether it is at work inside a span of time. */
         boolean works(double from, double to) {
             return start < to - INSTANT && end > from + INSTANT;
@@ -58,7 +70,22 @@ record Schedule(List<Run> runs) {
                     .orElseThrow(() -> new IllegalStateException("no pump for " + waiting));
         }
         runs.sort(Comparator.comparingDouble(Run::start));
-        return new Schedule(List.copyOf(runs));
+        return new Schedule(joined(runs));
+    }
+
+    /** Parts of a transfer that follow each other on one pump are one run. */
+    private static List<Run> joined(List<Run> runs) {
+        List<Run> joined = new ArrayList<>();
+        for (Run run : runs) {
+            Optional<Run> before =
+                    joined.stream().filter(earlier -> earlier.continuesAs(run)).findFirst();
+            if (before.isPresent()) {
+                joined.set(joined.indexOf(before.get()), before.get().with(run));
+            } else {
+                joined.add(run);
+            }
+        }
+        return List.copyOf(joined);
     }
 
     private static void startAll(

@@ -4,6 +4,7 @@ import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.io.InputStream;
 import java.util.Objects;
@@ -40,5 +41,20 @@ final class DemoPlanTest {
         assertThat(plan.worst().heelAngle().value()).isLessThanOrEqualTo(3);
         assertThat(plan.worst().trimAngle().value()).isLessThanOrEqualTo(3);
         assertThat(plan.caution()).contains("Planning aid only");
+    }
+
+    /** The start lies outside these limits: heel and trim may not grow until they are inside, so one pump has to start later. */
+    @Test
+    void theWayBackInsideTightLimitsIsFoundInOneMoveForEachTank() throws IOException {
+        PreparedPlatform prepared = PlatformReader.read(document("merganser.json"));
+        Condition condition = ConditionReader.read(document("condition.json"), prepared);
+        ObjectNode tight = (ObjectNode) document("request.json");
+        ((ObjectNode) tight.path("operationLimits")).put("maxHeel", 1.0).put("maxTrim", 1.0);
+        Plan plan = BallastPlanner.plan(prepared, condition, PlanRequestReader.read(tight, prepared, condition));
+        assertThat(plan.feasible()).isTrue();
+        assertThat(plan.binding()).isEmpty();
+        assertThat(plan.moves()).hasSize(plan.tanksTouched());
+        assertThat(plan.moves()).anyMatch(move -> move.startMinute() > 5);
+        assertThat(plan.worst().heelAngle().minute()).isZero();
     }
 }
