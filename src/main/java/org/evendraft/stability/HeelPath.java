@@ -10,6 +10,9 @@ import org.evendraft.geometry.Vec3;
  * ∝ −τ·a + φ·b + z. The trim rests where the energy is least over τ: there (G − B) has no part along a seen in the waterplane.
  */
 final class HeelPath {
+    /** Inclinations beyond this are not followed (rad). */
+    private static final double GREATEST = Math.toRadians(85);
+
     private static final int MOST_STEPS = 60;
     private static final double LONGEST_STEP = 0.1;
     /** Arm about the perpendicular axis under which the trim is at rest (m). */
@@ -55,9 +58,6 @@ final class HeelPath {
         }
         return freeTrim ? Optional.empty() : Optional.of(here);
     }
-
-    /** Inclinations beyond this are not followed (rad). */
-    static final double GREATEST = Math.toRadians(85);
 
     private Slopes slopes(double phi, double tau) {
         return alongHeel.times(phi).plus(alongTrim.times(tau));

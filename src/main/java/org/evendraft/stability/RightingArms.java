@@ -87,12 +87,24 @@ public final class RightingArms {
         return points;
     }
 
-    /** The platform at an angle on the curve (rad). */
+    /**
+     * The platform at an angle on the curve (rad), found from the nearest node, or else from the one on the angle's other side.
+     *
+     * @throws IllegalStateException when the trim finds no rest from either: no other angle's state stands in
+     */
     Inclination at(double angleRad) {
-        int i = (int) Math.min(nodes.size() - 1L, Math.max(0, Math.round(angleRad / stepRad)));
-        return i * stepRad == angleRad
-                ? nodes.get(i)
-                : path.at(nodes.get(i), angleRad).orElse(nodes.get(i));
+        int i = node(Math.round(angleRad / stepRad));
+        if (i * stepRad == angleRad) {
+            return nodes.get(i);
+        }
+        int other = node(i * stepRad < angleRad ? i + 1L : i - 1L);
+        return path.at(nodes.get(i), angleRad)
+                .or(() -> path.at(nodes.get(other), angleRad))
+                .orElseThrow(() -> new IllegalStateException("no rest at " + Math.toDegrees(angleRad) + "°"));
+    }
+
+    private int node(long wanted) {
+        return (int) Math.min(nodes.size() - 1L, Math.max(0, wanted));
     }
 
     /** The point at an angle on the curve (rad). */
@@ -133,8 +145,8 @@ public final class RightingArms {
     /** The angle of the greatest arm between two angles (rad). */
     double greatest(double fromRad, double toRad) {
         double best = fromRad;
-        for (double angle = fromRad; angle <= toRad; angle += stepRad) {
-            best = arm(angle) > arm(best) ? angle : best;
+        for (int i = (int) Math.ceil(fromRad / stepRad); i * stepRad <= toRad; i++) {
+            best = arm(i * stepRad) > arm(best) ? i * stepRad : best;
         }
         double low = Math.max(fromRad, best - stepRad);
         double high = Math.min(toRad, best + stepRad);

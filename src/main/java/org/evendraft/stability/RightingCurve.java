@@ -1,7 +1,6 @@
 package org.evendraft.stability;
 
 import java.util.List;
-import java.util.Optional;
 import org.evendraft.platform.Faults;
 import org.evendraft.platform.FaultyDocumentException;
 import org.jspecify.annotations.Nullable;
@@ -89,10 +88,5 @@ public record RightingCurve(
         public Request about(double otherAzimuth) {
             return new Request(otherAzimuth, to, step, freeTrim, liquids);
         }
-    }
-
-    /** The reason, if the curve ends early. */
-    public Optional<String> ending() {
-        return Optional.ofNullable(endReason);
     }
 }
