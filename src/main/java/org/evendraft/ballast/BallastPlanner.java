@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Locale;
 import java.util.stream.Stream;
 import org.evendraft.ballast.Plan.Optimality;
+import org.evendraft.platform.Caution;
 import org.evendraft.platform.Condition;
 import org.evendraft.platform.FaultyDocumentException;
 import org.evendraft.platform.PreparedPlatform;
@@ -68,7 +69,7 @@ public final class BallastPlanner {
                     Stream.concat(found.end().deviation().binding().stream(), path.limitsPassed().stream())
                             .toList(),
                     warnings(after),
-                    Plan.CAUTION);
+                    Caution.TEXT);
         }
 
         private List<Plan.EndFill> fills() {

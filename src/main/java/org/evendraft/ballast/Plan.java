@@ -38,11 +38,6 @@ public record Plan(
         List<Binding> binding,
         List<String> warnings,
         String caution) {
-    /** What every plan says. */
-    public static final String CAUTION =
-            "Planning aid only. The approved stability documents of the unit, class and flag rules and local codes govern;"
-                    + " the person in charge of ballast decides and verifies by soundings and draft marks.";
-
     /** Copies the lists. */
     public Plan {
         moves = List.copyOf(moves);

@@ -20,10 +20,15 @@ public final class Solid {
         double[] z = span(Axis.Z.direction());
         this.least = new Vec3(x[0], y[0], z[0]);
         this.greatest = new Vec3(x[1], y[1], z[1]);
-        Cut whole = new Cut(Plane.ofSlopes(z[1], 0, 0));
-        whole.addMesh(1, mesh);
-        this.volume = extrusion.map(Extrusion::volume).orElse(whole.volume());
-        this.moment = extrusion.map(Extrusion::moment).orElse(whole.moment());
+        if (extrusion.isPresent()) {
+            this.volume = extrusion.get().volume();
+            this.moment = extrusion.get().moment();
+        } else {
+            Cut whole = new Cut(Plane.ofSlopes(z[1], 0, 0));
+            whole.addMesh(1, mesh);
+            this.volume = whole.volume();
+            this.moment = whole.moment();
+        }
     }
 
     private double[] span(Vec3 direction) {

@@ -3,6 +3,7 @@ package org.evendraft.service;
 import java.time.Clock;
 import java.time.Instant;
 import java.time.temporal.ChronoUnit;
+import org.evendraft.platform.Caution;
 
 /**
  * Where figures come from, so that each can be traced. Component names are those of the JSON.
@@ -13,11 +14,6 @@ import java.time.temporal.ChronoUnit;
  * @param caution what they must not be taken for
  */
 public record Provenance(int platformRevision, String engineVersion, Instant computedAt, String caution) {
-    /** What every output says. */
-    public static final String CAUTION =
-            "Planning aid only. The approved stability documents of the unit, class and flag rules and local codes govern;"
-                    + " the person in charge of ballast decides and verifies by soundings and draft marks.";
-
     /**
      * Tells where figures computed now come from.
      *
@@ -29,7 +25,7 @@ public record Provenance(int platformRevision, String engineVersion, Instant com
         /** Of figures computed now from a platform's revision. */
         public Provenance of(int platformRevision) {
             Instant now = clock.instant().truncatedTo(ChronoUnit.MILLIS);
-            return new Provenance(platformRevision, engineVersion, now, CAUTION);
+            return new Provenance(platformRevision, engineVersion, now, Caution.TEXT);
         }
     }
 }
