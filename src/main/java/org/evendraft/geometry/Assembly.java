@@ -3,7 +3,7 @@ package org.evendraft.geometry;
 import java.util.List;
 import java.util.function.ToDoubleFunction;
 
-/** Bodies that together make one space, cut-outs negative: a hull, or the inside of a tank. Immutable. */
+/** Bodies that together make one space, cut-outs negative: a hull, whole or damaged, or the inside of a tank. Immutable. */
 public final class Assembly {
     private static final int MOST_STEPS = 200;
     /** Volume is met to this part of the whole. */
@@ -13,13 +13,20 @@ public final class Assembly {
     private final double volume;
 
     /**
-     * A body with its sign.
+     * A body with its weight.
      *
-     * @param cutOut whether it counts negative
+     * @param solid the body
+     * @param weight how often it counts: 1 for a body, −1 for a cut-out, −permeability for a space of it that the sea has flooded
      */
-    public record Part(Solid solid, boolean cutOut) {
-        double sign() {
-            return cutOut ? -1 : 1;
+    public record Part(Solid solid, double weight) {
+        /** A body, or a cut-out, which counts negative. */
+        public Part(Solid solid, boolean cutOut) {
+            this(solid, cutOut ? -1 : 1);
+        }
+
+        /** Whether it counts negative. */
+        public boolean cutOut() {
+            return weight < 0;
         }
     }
 
@@ -27,7 +34,7 @@ public final class Assembly {
     public Assembly(List<Part> parts) {
         this.parts = List.copyOf(parts);
         this.volume = this.parts.stream()
-                .mapToDouble(part -> part.sign() * part.solid().volume())
+                .mapToDouble(part -> part.weight() * part.solid().volume())
                 .sum();
     }
 
@@ -46,7 +53,7 @@ public final class Assembly {
         Vec3 moment = Vec3.ZERO;
         for (Part part : parts) {
             moment = moment.plus(
-                    part.solid().centroid().times(part.sign() * part.solid().volume()));
+                    part.solid().centroid().times(part.weight() * part.solid().volume()));
         }
         return moment.times(1 / volume);
     }
@@ -55,7 +62,7 @@ public final class Assembly {
     public Cut below(Plane plane) {
         Cut cut = new Cut(plane);
         for (Part part : parts) {
-            part.solid().addBelow(cut, part.sign());
+            part.solid().addBelow(cut, part.weight());
         }
         return cut;
     }
@@ -64,7 +71,7 @@ public final class Assembly {
     public Cut belowByTriangles(Plane plane) {
         Cut cut = new Cut(plane);
         for (Part part : parts) {
-            part.solid().addBelowByTriangles(cut, part.sign());
+            part.solid().addBelowByTriangles(cut, part.weight());
         }
         return cut;
     }

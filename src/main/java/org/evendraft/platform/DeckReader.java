@@ -39,6 +39,7 @@ final class DeckReader {
                     fields.number("zTo", Range.COORDINATE),
                     fields.number("areaX", Range.NOT_NEGATIVE),
                     fields.number("areaY", Range.NOT_NEGATIVE),
+                    fields.number("areaZ", Range.NOT_NEGATIVE, 0),
                     fields.number("shapeCoefficient", Range.NOT_NEGATIVE));
             if (element.zFrom() >= element.zTo()) {
                 fields.meaning(

@@ -1,6 +1,7 @@
 package org.evendraft.platform;
 
 import java.util.List;
+import java.util.stream.Stream;
 
 /**
  * A platform as its document describes it, checked.
@@ -18,6 +19,8 @@ import java.util.List;
  * @param openings openings through which water may enter
  * @param modes modes of operation with their limits
  * @param compartments spaces that damage may flood
+ * @param stabilityRules criteria of stability
+ * @param damageCases spaces that are flooded together, listed by hand
  */
 public record Platform(
         String id,
@@ -32,7 +35,9 @@ public record Platform(
         List<WindageElement> windage,
         List<Opening> openings,
         List<Mode> modes,
-        List<Compartment> compartments) {
+        List<Compartment> compartments,
+        StabilityRules stabilityRules,
+        List<DamageCase> damageCases) {
 
     /** Copies the lists. */
     public Platform {
@@ -45,5 +50,15 @@ public record Platform(
         openings = List.copyOf(openings);
         modes = List.copyOf(modes);
         compartments = List.copyOf(compartments);
+        damageCases = List.copyOf(damageCases);
+    }
+
+    /** All that damage may flood and whose shape is known: tanks with bodies, then compartments. */
+    public List<Space> spaces() {
+        Stream<Space> ofTanks = tanks.stream()
+                .filter(tank -> !tank.bodies().isEmpty())
+                .map(tank -> new Space(tank.id(), tank.bodies(), tank.permeability()));
+        Stream<Space> others = compartments.stream().map(c -> new Space(c.id(), c.bodies(), c.permeability()));
+        return Stream.concat(ofTanks, others).toList();
     }
 }

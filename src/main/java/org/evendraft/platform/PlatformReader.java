@@ -67,7 +67,9 @@ public final class PlatformReader {
                 DeckReader.windage(fields.objects("windage")),
                 DeckReader.openings(fields.objects("openings")),
                 ModeReader.read(fields.objects("modes")),
-                CompartmentReader.read(fields.objects("compartments")));
+                CompartmentReader.read(fields.objects("compartments")),
+                StabilityRules.NONE,
+                List.of());
         fields.noOthers();
         return platform;
     }

@@ -1,5 +1,7 @@
 package org.evendraft.platform;
 
+import java.util.ArrayList;
+import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
@@ -59,6 +61,26 @@ public final class PreparedPlatform {
     /** The hull. */
     public Assembly hull() {
         return hull;
+    }
+
+    /**
+     * The hull with spaces open to the sea: of each only what its permeability leaves keeps the platform afloat (lost buoyancy).
+     *
+     * @param spaces ids of tanks and compartments whose shape is known
+     * @throws IllegalArgumentException when there is no such space
+     */
+    public Assembly hullWithout(Collection<String> spaces) {
+        List<Assembly.Part> parts = new ArrayList<>(hull.parts());
+        for (String id : spaces) {
+            Space space = platform.spaces().stream()
+                    .filter(s -> s.id().equals(id))
+                    .findFirst()
+                    .orElseThrow(() -> new IllegalArgumentException("no space " + id));
+            for (Assembly.Part part : assembly(space.bodies()).parts()) {
+                parts.add(new Assembly.Part(part.solid(), -space.permeability() * part.weight()));
+            }
+        }
+        return new Assembly(parts);
     }
 
     /**

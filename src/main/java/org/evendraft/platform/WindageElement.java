@@ -9,7 +9,8 @@ package org.evendraft.platform;
  * @param zFrom its foot (m)
  * @param zTo its top (m)
  * @param areaX area seen along x, spread evenly over the height (m²)
- * @param areaY area seen along y (m²)
+ * @param areaY area seen along y, likewise (m²)
+ * @param areaZ area seen along z, likewise: what only inclination exposes, such as the underside of a deck (m²)
  * @param shapeCoefficient shape coefficient
  */
 public record WindageElement(
@@ -20,4 +21,5 @@ public record WindageElement(
         double zTo,
         double areaX,
         double areaY,
+        double areaZ,
         double shapeCoefficient) {}

@@ -24,7 +24,7 @@ final class Inclination {
         this.slopes = slopes;
         double mass = platform.mass();
         double density = platform.waterDensity();
-        this.hull = platform.prepared().hull().holding(mass / density, slopes.trim(), -slopes.heel(), guess);
+        this.hull = platform.hull().holding(mass / density, slopes.trim(), -slopes.heel(), guess);
         this.surfaces = surfaceGuesses.clone();
         Vec3 moment = platform.fixedMoment();
         SecondMoments stiffness = hull.projectedSecondMoments().times(-density);

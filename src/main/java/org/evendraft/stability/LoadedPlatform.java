@@ -7,6 +7,7 @@ import java.util.Set;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
+import org.evendraft.geometry.Assembly;
 import org.evendraft.geometry.Cut;
 import org.evendraft.geometry.SecondMoments;
 import org.evendraft.geometry.Vec3;
@@ -24,6 +25,7 @@ public final class LoadedPlatform {
     private static final double LEAST_RESERVE = 1e-9;
 
     private final PreparedPlatform prepared;
+    private final Assembly hull;
     private final double waterDensity;
     private final FreeSurface freeSurface;
     private final double fixedMass;
@@ -32,12 +34,14 @@ public final class LoadedPlatform {
 
     private LoadedPlatform(
             PreparedPlatform prepared,
+            Assembly hull,
             double waterDensity,
             FreeSurface freeSurface,
             double fixedMass,
             Vec3 fixedMoment,
             List<TankContents> tanks) {
         this.prepared = prepared;
+        this.hull = hull;
         this.waterDensity = waterDensity;
         this.freeSurface = freeSurface;
         this.fixedMass = fixedMass;
@@ -57,7 +61,8 @@ public final class LoadedPlatform {
         List<TankContents> tanks = prepared.platform().tanks().stream()
                 .map(tank -> contents(tank, prepared.calibration(tank.id()), fills))
                 .toList();
-        return new LoadedPlatform(prepared, condition.waterDensity(), condition.freeSurface(), mass, moment, tanks);
+        return new LoadedPlatform(
+                prepared, prepared.hull(), condition.waterDensity(), condition.freeSurface(), mass, moment, tanks);
     }
 
     private static TankContents contents(Tank tank, Calibration calibration, Map<String, Fill> fills) {
@@ -90,7 +95,7 @@ public final class LoadedPlatform {
 
     private LoadedPlatform withTanks(UnaryOperator<TankContents> change) {
         List<TankContents> changed = tanks.stream().map(change).toList();
-        return new LoadedPlatform(prepared, waterDensity, freeSurface, fixedMass, fixedMoment, changed);
+        return new LoadedPlatform(prepared, hull, waterDensity, freeSurface, fixedMass, fixedMoment, changed);
     }
 
     /** The same with every liquid held as on even keel and G raised by the free-surface correction about a horizontal axis. */
@@ -105,12 +110,17 @@ public final class LoadedPlatform {
                 + sin * sin * moments.longitudinal();
         double mass = mass();
         Vec3 moment = centreOfGravity().times(mass).plus(new Vec3(0, 0, aboutAxis));
-        return new LoadedPlatform(prepared, waterDensity, freeSurface, mass, moment, List.of());
+        return new LoadedPlatform(prepared, hull, waterDensity, freeSurface, mass, moment, List.of());
     }
 
     /** The platform. */
     public PreparedPlatform prepared() {
         return prepared;
+    }
+
+    /** What keeps it afloat: the platform's hull, less what the sea has flooded. */
+    Assembly hull() {
+        return hull;
     }
 
     /** Density of the sea (t/m³). */
@@ -146,7 +156,7 @@ public final class LoadedPlatform {
 
     /** What the whole hull displaces (t). */
     public double buoyancy() {
-        return waterDensity * prepared.hull().volume();
+        return waterDensity * hull.volume();
     }
 
     /** Whether the hull can carry the mass, and there is one. */
@@ -165,7 +175,7 @@ public final class LoadedPlatform {
             throw new IllegalStateException("mass " + mass() + " t of " + buoyancy() + " t");
         }
         double mass = mass();
-        Cut cut = prepared.hull().holding(mass / waterDensity, 0, 0, Double.NaN);
+        Cut cut = hull.holding(mass / waterDensity, 0, 0, Double.NaN);
         double kb = cut.centroid().z();
         SecondMoments inertia = cut.secondMoments();
         MetacentricMatrix solid = MetacentricMatrix.of(

@@ -47,7 +47,7 @@ class PlatformReaderTest {
         assertThat(p.pumps())
                 .containsExactly(new Pump("P1", 300, List.of("B1", "B2", "sea"), List.of("B1", "B2", "sea")));
         assertThat(p.deckAreas().get(0).size()).isEqualTo(360);
-        assertThat(p.windage()).containsExactly(new WindageElement("house", 0, 0, 20, 26, 60, 90, 1));
+        assertThat(p.windage()).containsExactly(new WindageElement("house", 0, 0, 20, 26, 60, 90, 0, 1));
         assertThat(p.openings()).containsExactly(new Opening("V1", new Vec3(4, 4, 20), Opening.Closing.WEATHERTIGHT));
         assertThat(p.compartments().get(0).permeability()).isEqualTo(0.95);
         Mode mode = p.modes().get(0);

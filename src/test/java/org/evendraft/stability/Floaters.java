@@ -16,6 +16,7 @@ import org.evendraft.platform.Load;
 import org.evendraft.platform.Platform;
 import org.evendraft.platform.PreparedPlatform;
 import org.evendraft.platform.Purpose;
+import org.evendraft.platform.StabilityRules;
 import org.evendraft.platform.Tank;
 
 /** Simple platforms and published floaters for tests, put together in code. */
@@ -57,6 +58,8 @@ public final class Floaters {
                 List.of(),
                 List.of(),
                 List.of(),
+                List.of(),
+                StabilityRules.NONE,
                 List.of()));
     }
 

@@ -24,6 +24,7 @@ import org.evendraft.platform.Opening;
 import org.evendraft.platform.Opening.Closing;
 import org.evendraft.platform.Platform;
 import org.evendraft.platform.PreparedPlatform;
+import org.evendraft.platform.StabilityRules;
 import org.evendraft.platform.Tank;
 import org.evendraft.stability.ConditionResult.LimitResult;
 import org.junit.jupiter.api.Test;
@@ -55,6 +56,8 @@ class LimitsTest {
                 List.of(),
                 openings,
                 List.of(),
+                List.of(),
+                StabilityRules.NONE,
                 List.of());
         return Evaluation.evaluate(
                 new PreparedPlatform(platform),

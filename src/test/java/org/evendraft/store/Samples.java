@@ -16,6 +16,7 @@ import org.evendraft.platform.Lightship;
 import org.evendraft.platform.Load;
 import org.evendraft.platform.Platform;
 import org.evendraft.platform.Purpose;
+import org.evendraft.platform.StabilityRules;
 import org.evendraft.platform.TableRow;
 import org.evendraft.platform.Tank;
 import org.evendraft.stability.ConditionResult;
@@ -61,6 +62,8 @@ final class Samples {
                 List.of(),
                 List.of(),
                 List.of(),
+                List.of(),
+                StabilityRules.NONE,
                 List.of());
     }
 
