@@ -5,7 +5,7 @@ import static java.nio.charset.StandardCharsets.UTF_8;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.MissingNode;
 import java.util.ArrayList;
-import java.util.Arrays;
+import java.util.EnumSet;
 import java.util.Iterator;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -173,22 +173,26 @@ public final class Fields {
 
     /** A constant by its code that must be there; empty after a fault. */
     public <E extends Enum<E>> Optional<E> choice(String name, Class<E> type) {
-        return required(name).flatMap(value -> choice(name, value, type));
+        return required(name).flatMap(value -> choice(name, value, EnumSet.allOf(type)));
     }
 
     /** A constant by its code, with a default. */
     public <E extends Enum<E>> E choice(String name, Class<E> type, E otherwise) {
-        return value(name).flatMap(value -> choice(name, value, type)).orElse(otherwise);
+        return choice(name, EnumSet.allOf(type), otherwise);
     }
 
-    private <E extends Enum<E>> Optional<E> choice(String name, JsonNode value, Class<E> type) {
-        E[] constants = type.getEnumConstants();
-        for (E constant : constants) {
+    /** One of some constants by its code, with a default. */
+    public <E extends Enum<E>> E choice(String name, Set<E> allowed, E otherwise) {
+        return value(name).flatMap(value -> choice(name, value, allowed)).orElse(otherwise);
+    }
+
+    private <E extends Enum<E>> Optional<E> choice(String name, JsonNode value, Set<E> allowed) {
+        for (E constant : allowed) {
             if (value.isTextual() && value.textValue().equals(Json.code(constant))) {
                 return Optional.of(constant);
             }
         }
-        List<String> codes = Arrays.stream(constants).map(Json::code).toList();
+        List<String> codes = allowed.stream().map(Json::code).toList();
         form(name, name + " must be one of " + String.join(", ", codes) + ", not " + Words.what(value));
         return Optional.empty();
     }
@@ -229,6 +233,16 @@ public final class Fields {
         List<String> texts = new ArrayList<>();
         for (JsonNode element : elements(name)) {
             texts.add(text(pointer(name) + "/" + texts.size(), "each entry of " + name, element));
+        }
+        return texts;
+    }
+
+    /** The texts of a list that must have at least one. */
+    public List<String> someTexts(String name) {
+        int before = faults.count();
+        List<String> texts = texts(name);
+        if (texts.isEmpty() && faults.count() == before && node.isObject()) {
+            form(name, name + " must have at least one entry");
         }
         return texts;
     }

@@ -24,7 +24,7 @@ public final class PlatformReader {
         Faults faults = new Faults();
         Platform platform = platform(Fields.of(document, "", faults));
         faults.throwIfAny();
-        TankPlaces.warnings(platform.hull(), platform.tanks()).forEach(faults::warn);
+        SpacePlaces.warnings(platform).forEach(faults::warn);
         PreparedPlatform prepared = new PreparedPlatform(platform, faults.warnings());
         checkFloats(prepared);
         return prepared;
@@ -54,6 +54,7 @@ public final class PlatformReader {
         List<Tank> tanks = TankReader.read(tankList, water);
         Set<String> tankIds = new LinkedHashSet<>();
         tanks.forEach(tank -> tankIds.add(tank.id()));
+        List<Compartment> compartments = CompartmentReader.read(fields.objects("compartments"));
         Platform platform = new Platform(
                 id,
                 fields.text("name", id),
@@ -67,9 +68,9 @@ public final class PlatformReader {
                 DeckReader.windage(fields.objects("windage")),
                 DeckReader.openings(fields.objects("openings")),
                 ModeReader.read(fields.objects("modes")),
-                CompartmentReader.read(fields.objects("compartments")),
-                StabilityRules.NONE,
-                List.of());
+                compartments,
+                RulesReader.read(fields.optionalObject("criteria")),
+                DamageCaseReader.read(fields.objects("damageCases"), tanks, compartments));
         fields.noOthers();
         return platform;
     }

@@ -50,6 +50,9 @@ public record Range(double least, boolean open, double greatest) {
     /** An angle from the upright, over 0 (degrees). */
     public static final Range ANGLE = new Range(0, true, 90);
 
+    /** An angle from the upright, or between two such, 0 included (degrees). */
+    public static final Range ANGLE_OR_NONE = new Range(0, false, 90);
+
     /** Whether the value is allowed; one that is not a number is not. */
     public boolean allows(double value) {
         return value <= greatest && (open ? value > least : value >= least);

@@ -34,7 +34,14 @@ public final class Examples {
               "modes": [ { "id": "work", "name": "Working", "draftRange": [3, 6], "minGm": { "transverse": 0.5 },
                 "allowableKg": [[3, 9], [6, 8]], "maxHeel": 3, "maxTrim": 2, "maxDeckLoad": 500, "windSpeed": 25 } ],
               "compartments": [ { "id": "C1", "permeability": 0.95,
-                "bodies": [ { "shape": "box", "min": [0, -10, 0], "max": [10, 0, 8] } ] } ] }
+                "bodies": [ { "shape": "box", "min": [0, -10, 0], "max": [10, 0, 8] } ] } ],
+              "criteria": { "rules": "moduSurface", "without": ["collision.openingsUnderWater"],
+                "own": [ { "name": "intact.leastGm", "clause": "owner's standing orders, 4", "situation": "intact",
+                           "measure": "leastGm", "bound": 0.3, "windSpeed": 0 },
+                         { "name": "intact.heel", "clause": "owner's standing orders, 5", "situation": "intact",
+                           "measure": "inclination", "bound": 15, "limitAngle": "downflooding", "openings": "notWatertight" } ] },
+              "damageCases": [ { "id": "bow", "situation": "flooding", "flooded": ["B1", "C1"] },
+                               { "id": "side", "flooded": ["B2"] } ] }
             """;
 
     private static final String CONDITION = """
