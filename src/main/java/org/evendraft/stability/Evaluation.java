@@ -57,7 +57,8 @@ public final class Evaluation {
         throw FaultyDocumentException.impossible("", reason(found));
     }
 
-    private static String reason(Equilibrium found) {
+    /** Why a platform does not float, in a sentence. */
+    static String reason(Equilibrium found) {
         if (found instanceof Equilibrium.Sinks sinks && sinks.mass() <= 0) {
             return String.format(Locale.ROOT, "The corrections leave a mass of %.1f t: nothing floats.", sinks.mass());
         }

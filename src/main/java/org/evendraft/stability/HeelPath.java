@@ -65,10 +65,15 @@ final class HeelPath {
 
     /** The righting arm (G − B)·(n × e), e the axis seen in the waterplane (m). */
     double arm(Inclination at) {
+        return -at.gravityOverBuoyancy().dot(leeward(at));
+    }
+
+    /** The horizontal direction e × n towards which the platform leans, square to the axis: the lower side's. */
+    Vec3 leeward(Inclination at) {
         Plane plane = at.waterplane().plane();
         Vec3 n = plane.normal();
         Vec3 e = axis.minus(n.times(axis.dot(n))).unit();
-        return at.gravityOverBuoyancy().dot(n.cross(e));
+        return e.cross(n);
     }
 
     RightingPoint point(Inclination at, double angleRad) {

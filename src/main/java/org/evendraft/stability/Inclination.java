@@ -76,6 +76,16 @@ final class Inclination {
         return new Waterplane(hull.plane().origin().z(), Math.atan(slopes.heel()), Math.atan(slopes.trim()));
     }
 
+    /** Centre of buoyancy (m). */
+    Vec3 centreOfBuoyancy() {
+        return hull.centroid();
+    }
+
+    /** Mass afloat (t). */
+    double mass() {
+        return platform.mass();
+    }
+
     /** From B to G (m). */
     Vec3 gravityOverBuoyancy() {
         return gravity.minus(hull.centroid());

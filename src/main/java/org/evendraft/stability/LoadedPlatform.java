@@ -9,6 +9,7 @@ import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import org.evendraft.geometry.Assembly;
 import org.evendraft.geometry.Cut;
+import org.evendraft.geometry.Plane;
 import org.evendraft.geometry.SecondMoments;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Calibration;
@@ -70,6 +71,27 @@ public final class LoadedPlatform {
         return new TankContents(tank, calibration, fill.density(), calibration.holding(fill.volume()), false);
     }
 
+    /**
+     * A platform that floats upright at a draft, G on the vertical through B, as limits of KG are found for: no liquid is free, for KG stands
+     * there for KG with the free-surface correction.
+     *
+     * @param draft even-keel draft (m), at which a part of the hull is in the water and a part over it
+     * @param kg height of G over the keel (m)
+     */
+    static LoadedPlatform upright(PreparedPlatform prepared, double waterDensity, double draft, double kg) {
+        Cut cut = prepared.hull().below(Plane.ofSlopes(draft, 0, 0));
+        double mass = waterDensity * cut.volume();
+        Vec3 centre = new Vec3(cut.centroid().x(), cut.centroid().y(), kg);
+        return new LoadedPlatform(
+                prepared, prepared.hull(), waterDensity, FreeSurface.ACTUAL, mass, centre.times(mass), List.of());
+    }
+
+    /** The same with G at another height, of a platform without tanks (m). */
+    LoadedPlatform withKg(double kg) {
+        Vec3 moment = new Vec3(fixedMoment.x(), fixedMoment.y(), kg * fixedMass);
+        return new LoadedPlatform(prepared, hull, waterDensity, freeSurface, fixedMass, moment, tanks);
+    }
+
     /** The same with other contents in the tanks named. */
     public LoadedPlatform withFills(Collection<Fill> fills) {
         Map<String, Fill> byTank = fills.stream().collect(Collectors.toMap(Fill::tank, Function.identity()));
@@ -91,6 +113,19 @@ public final class LoadedPlatform {
     /** The same with pumps at work on just the tanks named: they have a free surface even when all but full. */
     public LoadedPlatform withMoving(Set<String> ids) {
         return withTanks(t -> t.withMoving(ids.contains(t.tank().id())));
+    }
+
+    /** The same with spaces open to the sea: their buoyancy lost, and the tanks' contents with it. */
+    LoadedPlatform withFlooded(Collection<String> spaces) {
+        LoadedPlatform emptied = withTanks(t -> spaces.contains(t.tank().id()) ? t.with(t.density(), 0) : t);
+        return new LoadedPlatform(
+                prepared,
+                prepared.hullWithout(spaces),
+                waterDensity,
+                freeSurface,
+                fixedMass,
+                fixedMoment,
+                emptied.tanks);
     }
 
     private LoadedPlatform withTanks(UnaryOperator<TankContents> change) {

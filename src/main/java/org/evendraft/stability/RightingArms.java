@@ -6,12 +6,15 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
+import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
 import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
 import org.apache.commons.math3.optim.univariate.BrentOptimizer;
 import org.apache.commons.math3.optim.univariate.SearchInterval;
 import org.apache.commons.math3.optim.univariate.UnivariateObjectiveFunction;
+import org.apache.commons.math3.optim.univariate.UnivariatePointValuePair;
+import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Condition.FreeSurface;
 
 /**
@@ -36,12 +39,17 @@ public final class RightingArms {
     private final boolean complete;
 
     RightingArms(LoadedPlatform loaded, RightingCurve.Request request) {
+        this(loaded, request, Slopes.LEVEL);
+    }
+
+    /** @param near slopes from which the trim's rest at the angle 0 is sought */
+    RightingArms(LoadedPlatform loaded, RightingCurve.Request request, Slopes near) {
         double azimuthRad = Math.toRadians(request.azimuth());
         this.path = new HeelPath(azimuthRad, request.freeTrim());
         int steps = (int) Math.ceil(request.to() / request.step() - 1e-9);
         this.stepRad = Math.toRadians(request.to() / steps);
         LoadedPlatform counted = counted(loaded, request.liquids(), azimuthRad);
-        Optional<Inclination> here = path.at(Inclination.upright(counted), 0);
+        Optional<Inclination> here = path.at(Inclination.upright(counted).at(near), 0);
         while (here.isPresent() && nodes.size() <= steps) {
             nodes.add(here.get());
             here = nodes.size() <= steps ? path.at(here.get(), nodes.size() * stepRad) : here;
@@ -112,29 +120,34 @@ public final class RightingArms {
         return path.point(at(angleRad), angleRad);
     }
 
-    /** The righting arm at an angle on the curve (m). */
-    double arm(double angleRad) {
-        return path.arm(at(angleRad));
+    /** The righting arm of the platform held at an inclination of the curve (m). */
+    double arm(Inclination at) {
+        return path.arm(at);
+    }
+
+    /** The horizontal direction towards which the platform leans there, a unit vector in its axes: with the wind that heels it. */
+    Vec3 leeward(Inclination at) {
+        return path.leeward(at);
     }
 
     /**
-     * The first angle from a start on at which the arm less another passes 0.
+     * The first angle from a start on at which something passes 0.
      *
-     * @param other what is taken off, by angle (m)
+     * @param what what is looked at
      * @param fromRad where to start (rad)
      * @param upwards whether from negative to positive
      */
-    OptionalDouble crossing(DoubleUnaryOperator other, double fromRad, boolean upwards) {
+    OptionalDouble crossing(ToDoubleFunction<Inclination> what, double fromRad, boolean upwards) {
         double sign = upwards ? 1 : -1;
-        DoubleUnaryOperator excess = angle -> sign * (arm(angle) - other.applyAsDouble(angle));
+        DoubleUnaryOperator signed = angle -> sign * what.applyAsDouble(at(angle));
         double low = fromRad;
-        double atLow = excess.applyAsDouble(low);
+        double atLow = signed.applyAsDouble(low);
         while (low < endRad()) {
-            double high = Math.min(endRad(), (Math.floor(low / stepRad + 1e-9) + 1) * stepRad);
-            double atHigh = excess.applyAsDouble(high);
+            double high = nextNode(low);
+            double atHigh = signed.applyAsDouble(high);
             if (atLow < 0 && atHigh >= 0) {
                 return OptionalDouble.of(
-                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, excess::applyAsDouble, low, high));
+                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, low, high));
             }
             low = high;
             atLow = atHigh;
@@ -142,50 +155,97 @@ public final class RightingArms {
         return OptionalDouble.empty();
     }
 
-    /** The angle of the greatest arm between two angles (rad). */
-    double greatest(double fromRad, double toRad) {
+    private double nextNode(double angleRad) {
+        return Math.min(endRad(), (Math.floor(angleRad / stepRad + 1e-9) + 1) * stepRad);
+    }
+
+    /** The angle at which something is greatest between two angles (rad), to be found near a node where it is. */
+    double greatest(ToDoubleFunction<Inclination> what, double fromRad, double toRad) {
+        DoubleUnaryOperator byAngle = angle -> what.applyAsDouble(at(angle));
         double best = fromRad;
-        for (int i = (int) Math.ceil(fromRad / stepRad); i * stepRad <= toRad; i++) {
-            best = arm(i * stepRad) > arm(best) ? i * stepRad : best;
+        double most = byAngle.applyAsDouble(fromRad);
+        for (double angle = fromRad; angle < toRad; ) {
+            angle = Math.min(toRad, nextNode(angle));
+            double here = byAngle.applyAsDouble(angle);
+            best = here > most ? angle : best;
+            most = Math.max(most, here);
         }
         double low = Math.max(fromRad, best - stepRad);
         double high = Math.min(toRad, best + stepRad);
         if (!(high > low)) {
             return best;
         }
-        double found = new BrentOptimizer(1e-8, ANGLE_TOLERANCE)
+        UnivariatePointValuePair found = new BrentOptimizer(1e-8, ANGLE_TOLERANCE)
                 .optimize(
                         new MaxEval(MOST_EVALUATIONS),
-                        new UnivariateObjectiveFunction(this::arm),
+                        new UnivariateObjectiveFunction(byAngle::applyAsDouble),
                         GoalType.MAXIMIZE,
-                        new SearchInterval(low, high))
-                .getPoint();
-        return arm(found) > arm(best) ? found : best;
+                        new SearchInterval(low, high));
+        return found.getValue() > most ? found.getPoint() : best;
     }
 
-    /** Area under the arms between two angles (m·rad), by Simpson's rule halved until it settles. */
-    double area(double fromRad, double toRad) {
+    /**
+     * Area under something between two angles (its unit·rad), by Simpson's rule halved until it settles.
+     *
+     * @param tolerance error allowed under one degree of the curve
+     */
+    double area(ToDoubleFunction<Inclination> what, double fromRad, double toRad, double tolerance) {
+        Simpson simpson = new Simpson(angle -> what.applyAsDouble(at(angle)), tolerance / Math.toRadians(1));
         double sum = 0;
         double low = fromRad;
         while (low < toRad) {
-            double high = Math.min(toRad, (Math.floor(low / stepRad + 1e-9) + 1) * stepRad);
-            sum += simpson(low, arm(low), high, arm(high), arm((low + high) / 2), GREATEST_DEPTH);
+            double high = Math.min(toRad, nextNode(low));
+            sum += simpson.area(low, high);
             low = high;
         }
         return sum;
     }
 
-    private double simpson(double a, double atA, double b, double atB, double atMiddle, int depth) {
-        double m = (a + b) / 2;
-        double atLeft = arm((a + m) / 2);
-        double atRight = arm((m + b) / 2);
-        double whole = (b - a) / 6 * (atA + 4 * atMiddle + atB);
-        double halves = (b - a) / 12 * (atA + 4 * atLeft + 2 * atMiddle + 4 * atRight + atB);
-        double tolerance = AREA_TOLERANCE * (b - a) / Math.toRadians(1);
-        if (depth == 0 || Math.abs(halves - whole) <= 15 * tolerance) {
-            return halves + (halves - whole) / 15;
+    /**
+     * Simpson's rule with halved steps.
+     *
+     * @param what the integrand by angle (rad)
+     * @param tolerance error allowed for each radian
+     */
+    private record Simpson(DoubleUnaryOperator what, double tolerance) {
+        double area(double from, double to) {
+            double middle = (from + to) / 2;
+            return area(from, at(from), to, at(to), at(middle), GREATEST_DEPTH);
         }
-        return simpson(a, atA, m, atMiddle, atLeft, depth - 1) + simpson(m, atMiddle, b, atB, atRight, depth - 1);
+
+        private double at(double angleRad) {
+            return what.applyAsDouble(angleRad);
+        }
+
+        private double area(double a, double atA, double b, double atB, double atMiddle, int depth) {
+            double m = (a + b) / 2;
+            double atLeft = at((a + m) / 2);
+            double atRight = at((m + b) / 2);
+            double whole = (b - a) / 6 * (atA + 4 * atMiddle + atB);
+            double halves = (b - a) / 12 * (atA + 4 * atLeft + 2 * atMiddle + 4 * atRight + atB);
+            if (depth == 0 || Math.abs(halves - whole) <= 15 * tolerance * (b - a)) {
+                return halves + (halves - whole) / 15;
+            }
+            return area(a, atA, m, atMiddle, atLeft, depth - 1) + area(m, atMiddle, b, atB, atRight, depth - 1);
+        }
+    }
+
+    /** Where, from upright on, the platform rests under a heeling arm (m): there the righting arm less it passes 0 upwards. */
+    OptionalDouble rest(ToDoubleFunction<Inclination> heeling) {
+        ToDoubleFunction<Inclination> excess = at -> arm(at) - heeling.applyAsDouble(at);
+        double near = stepRad * BESIDE;
+        boolean rises = excess.applyAsDouble(at(near)) >= 0;
+        if (rises && excess.applyAsDouble(at(0)) >= 0) {
+            return OptionalDouble.of(0);
+        }
+        return crossing(excess, rises ? 0 : near, true);
+    }
+
+    /** Where, beyond its rest, the platform no longer withstands a heeling arm (m): there the righting arm less it passes 0 downwards. */
+    OptionalDouble secondIntercept(double restRad, ToDoubleFunction<Inclination> heeling) {
+        // From just beyond the first intercept: at it the difference is zero within rounding.
+        double beyond = Math.min(endRad(), restRad + stepRad * BESIDE);
+        return crossing(at -> arm(at) - heeling.applyAsDouble(at), beyond, false);
     }
 
     /**
@@ -194,28 +254,18 @@ public final class RightingArms {
      * @throws IllegalStateException when the platform cannot float
      */
     public static RightingCurve curve(LoadedPlatform loaded, RightingCurve.Request request) {
-        RightingArms arms = new RightingArms(loaded, request);
-        if (!arms.exists()) {
-            return empty(request);
-        }
-        DoubleUnaryOperator none = angle -> 0;
-        OptionalDouble first = arms.rest(none);
-        if (first.isEmpty()) {
-            return arms.figures(request, OptionalDouble.empty(), OptionalDouble.empty());
-        }
-        // From just beyond the first intercept: at it the arm is zero within rounding.
-        double beyond = Math.min(arms.endRad(), first.getAsDouble() + arms.stepRad() * BESIDE);
-        return arms.figures(request, first, arms.crossing(none, beyond, false));
+        return new RightingArms(loaded, request).curve(request);
     }
 
-    /** Where, from upright on, the platform rests under a heeling arm: there the arm less it passes 0 upwards. */
-    OptionalDouble rest(DoubleUnaryOperator heeling) {
-        double near = stepRad * BESIDE;
-        boolean rises = arm(near) >= heeling.applyAsDouble(near);
-        if (rises && arm(0) >= heeling.applyAsDouble(0)) {
-            return OptionalDouble.of(0);
+    /** The curve with its figures. */
+    RightingCurve curve(RightingCurve.Request request) {
+        if (!exists()) {
+            return empty(request);
         }
-        return crossing(heeling, rises ? 0 : near, true);
+        OptionalDouble first = rest(at -> 0);
+        OptionalDouble second =
+                first.isPresent() ? secondIntercept(first.getAsDouble(), at -> 0) : OptionalDouble.empty();
+        return figures(request, first, second);
     }
 
     private RightingCurve figures(RightingCurve.Request request, OptionalDouble first, OptionalDouble second) {
@@ -235,8 +285,8 @@ public final class RightingArms {
                 rights ? Double.valueOf(Math.toDegrees(from)) : null,
                 second.isPresent() ? Double.valueOf(Math.toDegrees(to)) : null,
                 rights ? Double.valueOf(Math.toDegrees(to - from)) : null,
-                point(greatest(0, endRad())),
-                rights ? Double.valueOf(area(from, to)) : null,
+                point(greatest(this::arm, 0, endRad())),
+                rights ? Double.valueOf(area(this::arm, from, to, AREA_TOLERANCE)) : null,
                 AREA_TOLERANCE * Math.max(1, Math.toDegrees(to - from)));
     }
 

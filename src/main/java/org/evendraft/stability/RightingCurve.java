@@ -84,6 +84,16 @@ public record RightingCurve(
             return new Request(azimuth, to, step, freeTrim, liquids);
         }
 
+        /** The curve on which criteria are judged: as far and as fine as this, or as they need. */
+        Request forCriteria() {
+            return new Request(
+                    azimuth,
+                    Math.max(to, AllAround.GREATEST_ANGLE),
+                    Math.min(step, AllAround.ANGLE_STEP),
+                    freeTrim,
+                    liquids);
+        }
+
         /** The same about another axis (degrees). */
         public Request about(double otherAzimuth) {
             return new Request(otherAzimuth, to, step, freeTrim, liquids);

@@ -10,6 +10,11 @@ record Slopes(double heel, double trim) {
 
     static final Slopes LEVEL = new Slopes(0, 0);
 
+    /** Those of a waterplane. */
+    static Slopes of(Waterplane at) {
+        return new Slopes(Math.tan(at.heelRad()), Math.tan(at.trimRad()));
+    }
+
     Slopes plus(Slopes o) {
         return new Slopes(heel + o.heel, trim + o.trim);
     }

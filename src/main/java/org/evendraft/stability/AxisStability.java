@@ -1,0 +1,146 @@
+package org.evendraft.stability;
+
+import java.util.EnumMap;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.ToDoubleFunction;
+import org.evendraft.platform.Criterion;
+import org.evendraft.platform.Criterion.LimitAngle;
+import org.evendraft.platform.Criterion.Openings;
+import org.evendraft.platform.Opening;
+import org.evendraft.platform.Platform;
+
+/**
+ * A platform's righting arms about one axis against the wind that heels it about that axis, and its openings on the way. Remembers what
+ * it has found; one thread at a time.
+ */
+final class AxisStability {
+    /** Error allowed in areas under one degree of a curve, where criteria compare them (m·rad): a thousandth of a usual ratio's digit. */
+    private static final double AREA_TOLERANCE = 1e-5;
+
+    private final RightingArms arms;
+    private final Wind wind;
+    private final List<Opening> openings;
+    private final Map<Double, OptionalDouble> rests = new HashMap<>();
+    private final Map<Double, OptionalDouble> seconds = new HashMap<>();
+    private final Map<Openings, Optional<Place>> floodings = new EnumMap<>(Openings.class);
+
+    /** @param arms the righting arms, which exist */
+    AxisStability(RightingArms arms, Platform platform) {
+        this.arms = arms;
+        this.wind = new Wind(platform.windage());
+        this.openings = platform.openings();
+    }
+
+    /**
+     * A place on the curve.
+     *
+     * @param angleRad the angle (rad)
+     * @param what what it is, in words
+     */
+    record Place(double angleRad, String what) {}
+
+    RightingArms arms() {
+        return arms;
+    }
+
+    /** Whether a wind of a speed (m/s) heels the platform at all. */
+    boolean isHeeledBy(double speed) {
+        return speed > 0 && wind.meetsSomething();
+    }
+
+    /** The wind's heeling arm by the platform's state (m). */
+    ToDoubleFunction<Inclination> heeling(double speed) {
+        return isHeeledBy(speed) ? at -> force(at, speed).arm() : at -> 0;
+    }
+
+    /** The wind's force (m/s). */
+    WindForce force(Inclination at, double speed) {
+        return wind.on(at, arms.leeward(at), speed);
+    }
+
+    /** Where the platform rests under a wind: the first intercept (rad). */
+    OptionalDouble rest(double speed) {
+        return rests.computeIfAbsent(speed, s -> arms.rest(heeling(s)));
+    }
+
+    /** The second intercept (rad). */
+    OptionalDouble secondIntercept(double speed) {
+        OptionalDouble rest = rest(speed);
+        return seconds.computeIfAbsent(
+                speed, s -> rest.isPresent() ? arms.secondIntercept(rest.getAsDouble(), heeling(s)) : rest);
+    }
+
+    /** Area under the righting arms over that under the wind's heeling arms, from upright to an angle. */
+    double areaRatio(double speed, double toRad) {
+        return arms.area(arms::arm, 0, toRad, AREA_TOLERANCE) / arms.area(heeling(speed), 0, toRad, AREA_TOLERANCE);
+    }
+
+    /** The angle between two others at which the righting arm is most against the heeling arm (rad). */
+    double bestRatio(double speed, double fromRad, double toRad) {
+        return arms.greatest(at -> ratio(at, speed), fromRad, toRad);
+    }
+
+    /** Righting over heeling arm at a state. */
+    double ratio(Inclination at, double speed) {
+        return arms.arm(at) / heeling(speed).applyAsDouble(at);
+    }
+
+    /** Where an opening first meets the water (rad); empty when that is not on the curve. */
+    OptionalDouble immersion(Opening opening) {
+        ToDoubleFunction<Inclination> depth = at -> -at.waterplane().freeboard(opening.position());
+        return depth.applyAsDouble(arms.at(0)) >= 0 ? OptionalDouble.of(0) : arms.crossing(depth, 0, true);
+    }
+
+    /** Where the first of the openings that count meets the water. */
+    Optional<Place> downflooding(Openings counted) {
+        return floodings.computeIfAbsent(counted, this::firstImmersion);
+    }
+
+    private Optional<Place> firstImmersion(Openings counted) {
+        return openings.stream()
+                .filter(counted::count)
+                .flatMap(opening -> immersion(opening).stream()
+                        .mapToObj(angle -> new Place(angle, "opening " + opening.id() + " meets the water")))
+                .reduce((a, b) -> b.angleRad() < a.angleRad() ? b : a);
+    }
+
+    /** The lowest opening that counts over the water at a state: its height (m), and which it is. */
+    Optional<Lowest> lowest(Openings counted, Inclination at) {
+        return openings.stream()
+                .filter(counted::count)
+                .map(opening -> new Lowest(at.waterplane().freeboard(opening.position()), opening.id()))
+                .reduce((a, b) -> b.height() < a.height() ? b : a);
+    }
+
+    /**
+     * An opening over the water.
+     *
+     * @param height its height (m)
+     * @param opening its id
+     */
+    record Lowest(double height, String opening) {}
+
+    /** Where a criterion's areas and ranges end; at the end of the curve when what ends them is not on it. */
+    Place limit(Criterion criterion, double speed) {
+        Optional<Place> flooding = downflooding(criterion.openings());
+        if (criterion.limitAngle() == LimitAngle.DOWNFLOODING && flooding.isPresent()) {
+            return flooding.get();
+        }
+        OptionalDouble second = secondIntercept(speed);
+        Place last = second.isPresent() ? new Place(second.getAsDouble(), "the second intercept") : end();
+        boolean floods = criterion.limitAngle() == LimitAngle.LESSER
+                && flooding.isPresent()
+                && flooding.get().angleRad() < last.angleRad();
+        return floods ? flooding.get() : last;
+    }
+
+    private Place end() {
+        return new Place(
+                arms.endRad(),
+                arms.complete() ? "the curve's last angle" : "the end of the curve, where the trim loses its rest");
+    }
+}

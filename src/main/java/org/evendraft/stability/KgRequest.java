@@ -1,0 +1,25 @@
+package org.evendraft.stability;
+
+import java.util.List;
+import java.util.OptionalDouble;
+import org.evendraft.platform.DamageCase;
+import org.evendraft.platform.Mode;
+
+/**
+ * What limits of KG are wanted.
+ *
+ * @param mode the mode whose wind and least GM count
+ * @param drafts even-keel drafts (m)
+ * @param windSpeed wind in place of the mode's (m/s)
+ * @param waterDensity density of the sea (t/m³)
+ * @param damageCases damage to be survived; none for the intact platform alone
+ */
+public record KgRequest(
+        Mode mode, List<Double> drafts, OptionalDouble windSpeed, double waterDensity, List<DamageCase> damageCases) {
+
+    /** Copies the lists. */
+    public KgRequest {
+        drafts = List.copyOf(drafts);
+        damageCases = List.copyOf(damageCases);
+    }
+}

@@ -1,0 +1,223 @@
+package org.evendraft.stability;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.TreeSet;
+import java.util.function.DoublePredicate;
+import org.evendraft.platform.Criterion;
+import org.evendraft.platform.Criterion.Measure;
+import org.evendraft.platform.DamageCase;
+import org.evendraft.platform.Mode;
+import org.evendraft.platform.PreparedPlatform;
+import org.evendraft.platform.Situation;
+import org.evendraft.platform.StabilityRules;
+import org.jspecify.annotations.Nullable;
+
+/**
+ * Finds the greatest KG at one draft. A criterion that holds at a KG is taken to hold at any lower one, so that one pass over all axes
+ * and damage cases does: each lowers the limit that the ones before have left, by bisection to a millimetre, or leaves it. Then the
+ * axes about the governing one are looked at more closely in the same way. Flooded tanks are taken as empty before, which loses
+ * the most buoyancy. One thread at a time.
+ */
+final class KgSearch {
+    /** The limit is found to this (m). */
+    static final double TOLERANCE = 1e-3;
+
+    /** First step down from a KG that breaks a criterion (m), doubled until one holds. */
+    private static final double FIRST_STEP = 0.25;
+
+    /** How far from the governing axis others are looked at, in parts of the step between axes. */
+    private static final double[] CLOSER = {-0.5, 0.5, -0.25, 0.25, -0.125, 0.125};
+
+    private final PreparedPlatform prepared;
+    private final KgRequest request;
+    private final Progress progress;
+    private final LoadedPlatform floating;
+    private final EvenKeel evenKeel;
+    private final Set<String> notJudged = new TreeSet<>();
+    private double limit;
+    private double breaksAt;
+    private Governing governing;
+
+    /**
+     * What sets the limit.
+     *
+     * @param criterion its name
+     * @param azimuth its axis (degrees); null where the criterion is of no axis
+     */
+    private record Governing(
+            String criterion,
+            String clause,
+            @Nullable Hull hull,
+            @Nullable Double azimuth) {}
+
+    /**
+     * A hull to be judged: whole, or damaged.
+     *
+     * @param damageCase the damage case; null for the whole one
+     * @param criteria by what it is judged
+     * @param afloat the platform on it, at any KG
+     */
+    private record Hull(@Nullable String damageCase, List<Criterion> criteria, LoadedPlatform afloat) {}
+
+    KgSearch(PreparedPlatform prepared, KgRequest request, double draft, Progress progress) {
+        this.prepared = prepared;
+        this.request = request;
+        this.progress = progress;
+        this.floating = LoadedPlatform.upright(
+                prepared, request.waterDensity(), draft, prepared.hull().lowest());
+        this.evenKeel = floating.evenKeel();
+        this.limit = Double.POSITIVE_INFINITY;
+        this.breaksAt = Double.POSITIVE_INFINITY;
+        this.governing = new Governing("none", "", null, null);
+    }
+
+    /** The limit. */
+    KgLimit find() {
+        boundByGm();
+        List<Hull> hulls = hulls();
+        int done = 0;
+        for (Hull hull : hulls) {
+            for (double azimuth : AllAround.azimuths()) {
+                String doing = hull.damageCase() == null ? "intact" : "damage case " + hull.damageCase();
+                progress.reached(
+                        done++ / (double) (hulls.size() * AllAround.azimuths().size()), doing);
+                lowerBy(hull, azimuth);
+            }
+        }
+        lookCloser();
+        return answer();
+    }
+
+    private void boundByGm() {
+        double lowest = prepared.hull().lowest();
+        Optional<Mode> mode = Optional.of(request.mode());
+        StabilityRules rules = prepared.platform().stabilityRules();
+        for (CriterionResult gm : IntactStability.metacentric(rules, mode, evenKeel.gm())) {
+            if (gm.margin() != null && lowest + gm.margin() < limit) {
+                limit = lowest + gm.margin();
+                breaksAt = limit;
+                governing = new Governing(gm.criterion(), gm.clause(), null, gm.azimuth());
+            }
+        }
+        if (limit == Double.POSITIVE_INFINITY) {
+            limit = lowest + evenKeel.gm().least().corrected();
+            breaksAt = limit;
+            governing = new Governing("positiveGm", "a platform of no GM does not float upright", null, null);
+        }
+    }
+
+    private List<Hull> hulls() {
+        StabilityRules rules = prepared.platform().stabilityRules();
+        List<Hull> hulls = new ArrayList<>();
+        List<Criterion> intact = rules.of(Situation.INTACT).stream()
+                .filter(c -> c.measure() != Measure.LEAST_GM)
+                .toList();
+        if (!intact.isEmpty()) {
+            hulls.add(new Hull(null, intact, floating));
+        }
+        for (DamageCase damage : request.damageCases()) {
+            List<Criterion> criteria = rules.of(damage.situation());
+            hulls.add(new Hull(damage.id(), criteria, floating.withFlooded(damage.flooded())));
+        }
+        return hulls;
+    }
+
+    /** Lowers the limit to where a hull's criteria hold about an axis. */
+    private void lowerBy(Hull hull, double azimuth) {
+        if (limit == Double.NEGATIVE_INFINITY || holds(hull, azimuth, limit)) {
+            return;
+        }
+        double high = limit;
+        double low = holding(hull, azimuth, high);
+        while (low > Double.NEGATIVE_INFINITY && high - low > TOLERANCE / 2) {
+            double middle = (low + high) / 2;
+            if (holds(hull, azimuth, middle)) {
+                low = middle;
+            } else {
+                high = middle;
+            }
+        }
+        limit = low;
+        breaksAt = high;
+        Broken broken = broken(hull, azimuth, high).orElse(new Broken("afloat", "the platform floats upright"));
+        governing = new Governing(broken.criterion(), broken.clause(), hull, azimuth);
+    }
+
+    /** A lower KG for which the criteria hold; −∞ when they do not hold even with G at the lowest point of the hull. */
+    private double holding(Hull hull, double azimuth, double from) {
+        double lowest = prepared.hull().lowest();
+        DoublePredicate holds = kg -> holds(hull, azimuth, kg);
+        for (double step = FIRST_STEP; from - step > lowest; step *= 2) {
+            if (holds.test(from - step)) {
+                return from - step;
+            }
+        }
+        return holds.test(lowest) ? lowest : Double.NEGATIVE_INFINITY;
+    }
+
+    private boolean holds(Hull hull, double azimuth, double kg) {
+        return broken(hull, azimuth, kg).isEmpty();
+    }
+
+    /** What is not kept. */
+    private record Broken(String criterion, String clause) {}
+
+    /** The first criterion that a hull breaks about an axis. */
+    private Optional<Broken> broken(Hull hull, double azimuth, double kg) {
+        LoadedPlatform loaded = hull.afloat().withKg(kg);
+        Slopes near = Slopes.LEVEL;
+        if (hull.damageCase() != null) {
+            if (!(loaded.floatingPosition() instanceof Equilibrium.Afloat afloat)) {
+                return Optional.of(new Broken("afloat", "the damaged platform floats"));
+            }
+            near = Slopes.of(afloat.waterplane());
+        }
+        OptionalDouble wind = IntactStability.wind(Optional.of(request.mode()), request.windSpeed());
+        List<Finding> findings = new AllAround(loaded, near, wind).findings(hull.criteria(), azimuth);
+        for (int i = 0; i < findings.size(); i++) {
+            Criterion criterion = hull.criteria().get(i);
+            Finding finding = findings.get(i);
+            if (!finding.isKept(criterion)) {
+                return Optional.of(new Broken(criterion.name(), criterion.clause()));
+            }
+            if (finding.value().isEmpty()) {
+                notJudged.add(criterion.name() + ": " + finding.note());
+            }
+        }
+        return Optional.empty();
+    }
+
+    private void lookCloser() {
+        Governing found = governing;
+        Hull hull = found.hull();
+        Double azimuth = found.azimuth();
+        if (hull == null || azimuth == null) {
+            return;
+        }
+        for (double part : CLOSER) {
+            lowerBy(hull, azimuth + part * AllAround.AZIMUTH_STEP);
+        }
+    }
+
+    private KgLimit answer() {
+        Hull hull = governing.hull();
+        Double azimuth = governing.azimuth();
+        boolean found = limit > Double.NEGATIVE_INFINITY;
+        return new KgLimit(
+                evenKeel.draft(),
+                floating.mass(),
+                evenKeel.km().transverse(),
+                evenKeel.km().longitudinal(),
+                found ? Double.valueOf(limit) : null,
+                found ? Double.valueOf(breaksAt) : null,
+                governing.criterion(),
+                governing.clause(),
+                hull == null ? null : hull.damageCase(),
+                azimuth == null ? null : Double.valueOf((azimuth + 360) % 360),
+                List.copyOf(notJudged));
+    }
+}
