@@ -64,7 +64,7 @@ public record AxisAnswer(
                 openings(loaded, afloat, axis),
                 rules.rules(),
                 rules.assumed(),
-                criteria(loaded, mode, wind, request));
+                criteria(loaded, afloat, mode, wind, request));
     }
 
     /** The wind at the nodes of the curve. */
@@ -95,14 +95,19 @@ public record AxisAnswer(
     }
 
     private static List<CriterionResult> criteria(
-            LoadedPlatform loaded, Optional<Mode> mode, OptionalDouble wind, RightingCurve.Request request) {
+            LoadedPlatform loaded,
+            Afloat afloat,
+            Optional<Mode> mode,
+            OptionalDouble wind,
+            RightingCurve.Request request) {
         StabilityRules rules = loaded.prepared().platform().stabilityRules();
         List<CriterionResult> results = new ArrayList<>(
                 IntactStability.metacentric(rules, mode, loaded.evenKeel().gm()));
         List<Criterion> byAxis = rules.of(Situation.INTACT).stream()
                 .filter(c -> c.measure() != Measure.LEAST_GM)
                 .toList();
-        List<Finding> findings = new AllAround(loaded, Slopes.LEVEL, wind).findings(byAxis, request.forCriteria());
+        List<Finding> findings =
+                new AllAround(loaded, Slopes.of(afloat.waterplane()), wind).findings(byAxis, request.forCriteria());
         for (int i = 0; i < findings.size(); i++) {
             Criterion criterion = byAxis.get(i);
             results.add(findings.get(i).result(criterion, null, request.azimuth(), AxisJudge.wind(criterion, wind)));

@@ -46,7 +46,7 @@ final class AxisJudge {
             return noHeeling();
         }
         AxisStability.Place limit = axis.limit(criterion, wind);
-        if (limit.angleRad() == 0) {
+        if (limit.angleRad() <= 0) {
             return Finding.broken("upright already, " + limit.what());
         }
         return Finding.of(axis.areaRatio(wind, limit.angleRad()), limit.angleRad(), "to " + limit.what());

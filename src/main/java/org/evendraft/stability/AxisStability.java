@@ -69,9 +69,12 @@ final class AxisStability {
 
     /** The second intercept (rad). */
     OptionalDouble secondIntercept(double speed) {
+        return seconds.computeIfAbsent(speed, s -> secondIntercept(s, RightingArms.FAR));
+    }
+
+    private OptionalDouble secondIntercept(double speed, double toRad) {
         OptionalDouble rest = rest(speed);
-        return seconds.computeIfAbsent(
-                speed, s -> rest.isPresent() ? arms.secondIntercept(rest.getAsDouble(), heeling(s)) : rest);
+        return rest.isPresent() ? arms.secondIntercept(rest.getAsDouble(), toRad, heeling(speed)) : rest;
     }
 
     /** Area under the righting arms over that under the wind's heeling arms, from upright to an angle. */
@@ -91,8 +94,14 @@ final class AxisStability {
 
     /** Where an opening first meets the water (rad); empty when that is not on the curve. */
     OptionalDouble immersion(Opening opening) {
-        ToDoubleFunction<Inclination> depth = at -> -at.waterplane().freeboard(opening.position());
-        return depth.applyAsDouble(arms.at(0)) >= 0 ? OptionalDouble.of(0) : arms.crossing(depth, 0, true);
+        return immersion(at -> at.waterplane().freeboard(opening.position()));
+    }
+
+    private OptionalDouble immersion(ToDoubleFunction<Inclination> height) {
+        double start = arms.startRad();
+        return height.applyAsDouble(arms.at(start)) <= 0
+                ? OptionalDouble.of(start)
+                : arms.crossing(height, start, RightingArms.FAR, false);
     }
 
     /** Where the first of the openings that count meets the water. */
@@ -101,11 +110,13 @@ final class AxisStability {
     }
 
     private Optional<Place> firstImmersion(Openings counted) {
-        return openings.stream()
-                .filter(counted::count)
-                .flatMap(opening -> immersion(opening).stream()
-                        .mapToObj(angle -> new Place(angle, "opening " + opening.id() + " meets the water")))
-                .reduce((a, b) -> b.angleRad() < a.angleRad() ? b : a);
+        OptionalDouble angle =
+                immersion(at -> lowest(counted, at).map(Lowest::height).orElse(Double.POSITIVE_INFINITY));
+        return angle.stream()
+                .boxed()
+                .flatMap(a -> lowest(counted, arms.at(a)).stream()
+                        .map(low -> new Place(a, "opening " + low.opening() + " meets the water")))
+                .findFirst();
     }
 
     /** The lowest opening that counts over the water at a state: its height (m), and which it is. */
@@ -126,16 +137,18 @@ final class AxisStability {
 
     /** Where a criterion's areas and ranges end; at the end of the curve when what ends them is not on it. */
     Place limit(Criterion criterion, double speed) {
-        Optional<Place> flooding = downflooding(criterion.openings());
-        if (criterion.limitAngle() == LimitAngle.DOWNFLOODING && flooding.isPresent()) {
+        LimitAngle wanted = criterion.limitAngle();
+        Optional<Place> flooding =
+                wanted == LimitAngle.SECOND_INTERCEPT ? Optional.empty() : downflooding(criterion.openings());
+        if (flooding.isPresent() && wanted == LimitAngle.DOWNFLOODING) {
             return flooding.get();
         }
-        OptionalDouble second = secondIntercept(speed);
-        Place last = second.isPresent() ? new Place(second.getAsDouble(), "the second intercept") : end();
-        boolean floods = criterion.limitAngle() == LimitAngle.LESSER
-                && flooding.isPresent()
-                && flooding.get().angleRad() < last.angleRad();
-        return floods ? flooding.get() : last;
+        OptionalDouble second =
+                flooding.isPresent() ? secondIntercept(speed, flooding.get().angleRad()) : secondIntercept(speed);
+        if (second.isPresent()) {
+            return new Place(second.getAsDouble(), "the second intercept");
+        }
+        return flooding.orElseGet(this::end);
     }
 
     private Place end() {

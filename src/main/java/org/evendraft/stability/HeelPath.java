@@ -63,6 +63,11 @@ final class HeelPath {
         return alongHeel.times(phi).plus(alongTrim.times(tau));
     }
 
+    /** How far slopes lean about the axis (rad). */
+    double lean(Slopes slopes) {
+        return Math.atan(slopes.dot(alongHeel));
+    }
+
     /** The righting arm (G − B)·(n × e), e the axis seen in the waterplane (m). */
     double arm(Inclination at) {
         return -at.gravityOverBuoyancy().dot(leeward(at));

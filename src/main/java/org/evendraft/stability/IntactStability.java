@@ -11,6 +11,7 @@ import org.evendraft.platform.GmBound;
 import org.evendraft.platform.Mode;
 import org.evendraft.platform.Situation;
 import org.evendraft.platform.StabilityRules;
+import org.evendraft.stability.Equilibrium.Afloat;
 import org.jspecify.annotations.Nullable;
 
 /** Judges the intact platform by the criteria of its rules, over all horizontal axes. */
@@ -20,17 +21,19 @@ public final class IntactStability {
     /**
      * The intact criteria, each about its worst axis.
      *
-     * @param loaded the platform, which floats
+     * @param loaded the platform
+     * @param afloat where it floats
      * @param mode the mode in force, whose wind and least GM count
      * @param windSpeed wind in place of the mode's (m/s)
      */
-    public static List<CriterionResult> judge(LoadedPlatform loaded, Optional<Mode> mode, OptionalDouble windSpeed) {
+    public static List<CriterionResult> judge(
+            LoadedPlatform loaded, Afloat afloat, Optional<Mode> mode, OptionalDouble windSpeed) {
         StabilityRules rules = loaded.prepared().platform().stabilityRules();
         List<Criterion> byAxis = rules.of(Situation.INTACT).stream()
                 .filter(c -> c.measure() != Measure.LEAST_GM)
                 .toList();
         OptionalDouble wind = wind(mode, windSpeed);
-        AllAround around = new AllAround(loaded, Slopes.LEVEL, wind);
+        AllAround around = new AllAround(loaded, Slopes.of(afloat.waterplane()), wind);
         return Stream.concat(
                         metacentric(rules, mode, loaded.evenKeel().gm()).stream(),
                         around.results(byAxis, null).stream())

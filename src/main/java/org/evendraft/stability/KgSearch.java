@@ -41,6 +41,9 @@ final class KgSearch {
     private double limit;
     private double breaksAt;
     private Governing governing;
+    private @Nullable String lastCase;
+    private double lastKg;
+    private Optional<Slopes> lastPosition = Optional.empty();
 
     /**
      * What sets the limit.
@@ -169,15 +172,12 @@ final class KgSearch {
     /** The first criterion that a hull breaks about an axis. */
     private Optional<Broken> broken(Hull hull, double azimuth, double kg) {
         LoadedPlatform loaded = hull.afloat().withKg(kg);
-        Slopes near = Slopes.LEVEL;
-        if (hull.damageCase() != null) {
-            if (!(loaded.floatingPosition() instanceof Equilibrium.Afloat afloat)) {
-                return Optional.of(new Broken("afloat", "the damaged platform floats"));
-            }
-            near = Slopes.of(afloat.waterplane());
+        Optional<Slopes> near = position(hull, kg);
+        if (near.isEmpty()) {
+            return Optional.of(new Broken("afloat", "the damaged platform floats"));
         }
         OptionalDouble wind = IntactStability.wind(Optional.of(request.mode()), request.windSpeed());
-        List<Finding> findings = new AllAround(loaded, near, wind).findings(hull.criteria(), azimuth);
+        List<Finding> findings = new AllAround(loaded, near.get(), wind).findings(hull.criteria(), azimuth);
         for (int i = 0; i < findings.size(); i++) {
             Criterion criterion = hull.criteria().get(i);
             Finding finding = findings.get(i);
@@ -189,6 +189,21 @@ final class KgSearch {
             }
         }
         return Optional.empty();
+    }
+
+    /** Where the platform floats; the position found last is remembered, for axis after axis is judged at the same limit. */
+    private Optional<Slopes> position(Hull hull, double kg) {
+        if (hull.damageCase() == null) {
+            return Optional.of(Slopes.LEVEL);
+        }
+        if (!hull.damageCase().equals(lastCase) || kg != lastKg) {
+            lastCase = hull.damageCase();
+            lastKg = kg;
+            lastPosition = hull.afloat().withKg(kg).floatingPosition() instanceof Equilibrium.Afloat afloat
+                    ? Optional.of(Slopes.of(afloat.waterplane()))
+                    : Optional.empty();
+        }
+        return lastPosition;
     }
 
     private void lookCloser() {

@@ -1,12 +1,15 @@
 package org.evendraft.stability;
 
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.IntStream;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
 import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
@@ -18,8 +21,8 @@ import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Condition.FreeSurface;
 
 /**
- * The righting arms of one platform about one axis, known at nodes a step apart and computed exactly in between from the nearest
- * node. Immutable after construction.
+ * The righting arms of one platform about one axis, at nodes a step apart, each found from the one before when it is first asked for,
+ * and exactly in between from the nearest node. Remembers what it has found; one thread at a time.
  */
 public final class RightingArms {
     /** Error of the area under one degree of the curve (m·rad). */
@@ -30,31 +33,49 @@ public final class RightingArms {
     /** So small a part of a step beside an angle, the sign of the arm tells on which side of a crossing the angle lies. */
     private static final double BESIDE = 1e-3;
 
+    /** Further than any curve goes (rad). */
+    static final double FAR = Double.POSITIVE_INFINITY;
+
     private static final int MOST_EVALUATIONS = 200;
     private static final int GREATEST_DEPTH = 10;
 
     private final HeelPath path;
     private final double stepRad;
+    /** Places of the first and the last node, in steps from upright. */
+    private final int first;
+
+    private final int last;
     private final List<Inclination> nodes = new ArrayList<>();
-    private final boolean complete;
+    private final Map<Double, Inclination> between = new HashMap<>();
+    private boolean ended;
 
     RightingArms(LoadedPlatform loaded, RightingCurve.Request request) {
         this(loaded, request, Slopes.LEVEL);
     }
 
-    /** @param near slopes from which the trim's rest at the angle 0 is sought */
+    /** @param near slopes at which the platform floats: when it leans away from the axis's lower side, the curve begins before upright */
     RightingArms(LoadedPlatform loaded, RightingCurve.Request request, Slopes near) {
         double azimuthRad = Math.toRadians(request.azimuth());
         this.path = new HeelPath(azimuthRad, request.freeTrim());
-        int steps = (int) Math.ceil(request.to() / request.step() - 1e-9);
-        this.stepRad = Math.toRadians(request.to() / steps);
+        this.last = (int) Math.ceil(request.to() / request.step() - 1e-9);
+        this.stepRad = Math.toRadians(request.to() / last);
+        double lean = path.lean(near);
+        this.first = lean < 0 ? (int) Math.floor(lean / stepRad) - 1 : 0;
         LoadedPlatform counted = counted(loaded, request.liquids(), azimuthRad);
-        Optional<Inclination> here = path.at(Inclination.upright(counted).at(near), 0);
-        while (here.isPresent() && nodes.size() <= steps) {
-            nodes.add(here.get());
-            here = nodes.size() <= steps ? path.at(here.get(), nodes.size() * stepRad) : here;
+        add(path.at(Inclination.upright(counted).at(near), first * stepRad));
+    }
+
+    private void add(Optional<Inclination> node) {
+        node.ifPresentOrElse(nodes::add, () -> ended = true);
+        ended |= nodes.size() > last - first;
+    }
+
+    /** Follows the curve as far as an angle, if it goes so far. */
+    private boolean reaches(double angleRad) {
+        while (!ended && (first + nodes.size() - 1) * stepRad < angleRad) {
+            add(path.at(nodes.get(nodes.size() - 1), (first + nodes.size()) * stepRad));
         }
-        this.complete = nodes.size() > steps;
+        return angleRad <= (first + nodes.size() - 1) * stepRad;
     }
 
     /** The platform with its liquids as the treatment has them: free, or at rest with G raised by the correction about the axis. */
@@ -66,19 +87,25 @@ public final class RightingArms {
         };
     }
 
-    /** Whether the curve exists at all. */
+    /** Whether the curve exists at all: it has an upright. */
     boolean exists() {
-        return !nodes.isEmpty();
+        return !nodes.isEmpty() && reaches(0);
     }
 
     /** Whether it reaches the angle asked for. */
     boolean complete() {
-        return complete;
+        return reaches(last * stepRad);
+    }
+
+    /** Its first angle (rad): 0, or less where the platform leans the other way. */
+    double startRad() {
+        return first * stepRad;
     }
 
     /** The last angle of the curve (rad). */
     double endRad() {
-        return (nodes.size() - 1) * stepRad;
+        reaches(last * stepRad);
+        return (first + nodes.size() - 1) * stepRad;
     }
 
     /** The angle between nodes (rad). */
@@ -88,11 +115,10 @@ public final class RightingArms {
 
     /** The points at the nodes. */
     List<RightingPoint> points() {
-        List<RightingPoint> points = new ArrayList<>();
-        for (int i = 0; i < nodes.size(); i++) {
-            points.add(path.point(nodes.get(i), i * stepRad));
-        }
-        return points;
+        int count = (int) Math.round((endRad() - startRad()) / stepRad) + 1;
+        return IntStream.range(first, first + count)
+                .mapToObj(i -> point(i * stepRad))
+                .toList();
     }
 
     /**
@@ -101,18 +127,20 @@ public final class RightingArms {
      * @throws IllegalStateException when the trim finds no rest from either: no other angle's state stands in
      */
     Inclination at(double angleRad) {
-        int i = node(Math.round(angleRad / stepRad));
-        if (i * stepRad == angleRad) {
-            return nodes.get(i);
+        reaches(angleRad);
+        long nearest = Math.round(angleRad / stepRad);
+        if (nearest * stepRad == angleRad) {
+            return node(nearest);
         }
-        int other = node(i * stepRad < angleRad ? i + 1L : i - 1L);
-        return path.at(nodes.get(i), angleRad)
-                .or(() -> path.at(nodes.get(other), angleRad))
-                .orElseThrow(() -> new IllegalStateException("no rest at " + Math.toDegrees(angleRad) + "°"));
+        return between.computeIfAbsent(
+                angleRad,
+                angle -> path.at(node(nearest), angle)
+                        .or(() -> path.at(node(nearest * stepRad < angle ? nearest + 1 : nearest - 1), angle))
+                        .orElseThrow(() -> new IllegalStateException("no rest at " + Math.toDegrees(angle) + "°")));
     }
 
-    private int node(long wanted) {
-        return (int) Math.min(nodes.size() - 1L, Math.max(0, wanted));
+    private Inclination node(long place) {
+        return nodes.get((int) Math.min(nodes.size() - 1L, Math.max(0, place - first)));
     }
 
     /** The point at an angle on the curve (rad). */
@@ -131,23 +159,25 @@ public final class RightingArms {
     }
 
     /**
-     * The first angle from a start on at which something passes 0.
+     * The first angle between two others at which something passes 0.
      *
      * @param what what is looked at
      * @param fromRad where to start (rad)
+     * @param toRad where to stop (rad), or further than the curve goes
      * @param upwards whether from negative to positive
      */
-    OptionalDouble crossing(ToDoubleFunction<Inclination> what, double fromRad, boolean upwards) {
+    OptionalDouble crossing(ToDoubleFunction<Inclination> what, double fromRad, double toRad, boolean upwards) {
         double sign = upwards ? 1 : -1;
         DoubleUnaryOperator signed = angle -> sign * what.applyAsDouble(at(angle));
         double low = fromRad;
         double atLow = signed.applyAsDouble(low);
-        while (low < endRad()) {
+        while (low < toRad && reaches(nextNode(low))) {
             double high = nextNode(low);
             double atHigh = signed.applyAsDouble(high);
             if (atLow < 0 && atHigh >= 0) {
-                return OptionalDouble.of(
-                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, low, high));
+                double found =
+                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, low, high);
+                return found <= toRad ? OptionalDouble.of(found) : OptionalDouble.empty();
             }
             low = high;
             atLow = atHigh;
@@ -156,7 +186,7 @@ public final class RightingArms {
     }
 
     private double nextNode(double angleRad) {
-        return Math.min(endRad(), (Math.floor(angleRad / stepRad + 1e-9) + 1) * stepRad);
+        return (Math.floor(angleRad / stepRad + 1e-9) + 1) * stepRad;
     }
 
     /** The angle at which something is greatest between two angles (rad), to be found near a node where it is. */
@@ -230,22 +260,31 @@ public final class RightingArms {
         }
     }
 
-    /** Where, from upright on, the platform rests under a heeling arm (m): there the righting arm less it passes 0 upwards. */
+    /** Where the platform first rests under a heeling arm (m): there the righting arm less it passes 0 upwards. */
     OptionalDouble rest(ToDoubleFunction<Inclination> heeling) {
         ToDoubleFunction<Inclination> excess = at -> arm(at) - heeling.applyAsDouble(at);
-        double near = stepRad * BESIDE;
-        boolean rises = excess.applyAsDouble(at(near)) >= 0;
-        if (rises && excess.applyAsDouble(at(0)) >= 0) {
-            return OptionalDouble.of(0);
+        double near = startRad() + stepRad * BESIDE;
+        if (!reaches(startRad() + stepRad)) {
+            return OptionalDouble.empty();
         }
-        return crossing(excess, rises ? 0 : near, true);
+        boolean rises = excess.applyAsDouble(at(near)) >= 0;
+        if (rises && excess.applyAsDouble(at(startRad())) >= 0) {
+            return OptionalDouble.of(startRad());
+        }
+        return crossing(excess, rises ? startRad() : near, FAR, true);
     }
 
-    /** Where, beyond its rest, the platform no longer withstands a heeling arm (m): there the righting arm less it passes 0 downwards. */
-    OptionalDouble secondIntercept(double restRad, ToDoubleFunction<Inclination> heeling) {
+    /**
+     * Where, beyond its rest, the platform no longer withstands a heeling arm (m): there the righting arm less it passes 0 downwards.
+     *
+     * @param toRad how far to look (rad)
+     */
+    OptionalDouble secondIntercept(double restRad, double toRad, ToDoubleFunction<Inclination> heeling) {
         // From just beyond the first intercept: at it the difference is zero within rounding.
-        double beyond = Math.min(endRad(), restRad + stepRad * BESIDE);
-        return crossing(at -> arm(at) - heeling.applyAsDouble(at), beyond, false);
+        double beyond = restRad + stepRad * BESIDE;
+        return beyond < toRad && reaches(beyond)
+                ? crossing(at -> arm(at) - heeling.applyAsDouble(at), beyond, toRad, false)
+                : OptionalDouble.empty();
     }
 
     /**
@@ -262,10 +301,10 @@ public final class RightingArms {
         if (!exists()) {
             return empty(request);
         }
-        OptionalDouble first = rest(at -> 0);
+        OptionalDouble rest = rest(at -> 0);
         OptionalDouble second =
-                first.isPresent() ? secondIntercept(first.getAsDouble(), at -> 0) : OptionalDouble.empty();
-        return figures(request, first, second);
+                rest.isPresent() ? secondIntercept(rest.getAsDouble(), FAR, at -> 0) : OptionalDouble.empty();
+        return figures(request, rest, second);
     }
 
     private RightingCurve figures(RightingCurve.Request request, OptionalDouble first, OptionalDouble second) {
@@ -277,8 +316,8 @@ public final class RightingArms {
                 request.freeTrim(),
                 request.liquids(),
                 points(),
-                complete ? null : Double.valueOf(Math.toDegrees(endRad())),
-                complete
+                complete() ? null : Double.valueOf(Math.toDegrees(endRad())),
+                complete()
                         ? null
                         : String.format(
                                 Locale.ROOT, "Beyond %.2f° the trim finds no stable rest.", Math.toDegrees(endRad())),
