@@ -69,6 +69,7 @@ final class RunningStation implements Station {
     public String listen() {
         Options options = new Options(
                 settings.host(), settings.port(), settings.maxBodyBytes(), settings.requestTime(), settings.token());
+        controlRoom.jobs().begin();
         HttpServer started = HttpServer.start(options, controlRoom);
         server = started;
         LOG.atInfo().addKeyValue("address", started.address()).log("listening");
@@ -94,6 +95,7 @@ final class RunningStation implements Station {
             running.close();
             LOG.info("stopped");
         }
+        controlRoom.jobs().close();
         database.close();
         stopped.countDown();
     }

@@ -13,6 +13,9 @@ import org.slf4j.LoggerFactory;
 final class Failures {
     private static final Logger LOG = LoggerFactory.getLogger(Failures.class);
 
+    private static final String SOON = "5"; // s
+    private static final String WHEN_A_JOB_MAY_BE_FINISHED = "30"; // s
+
     private Failures() {}
 
     /** The response; a bug goes to the log with an id that the client is given. */
@@ -37,7 +40,8 @@ final class Failures {
         return switch (refusal.reason()) {
             case UNAUTHORIZED -> answer.with("WWW-Authenticate", "Bearer");
             case TOO_LARGE -> answer.with("Connection", "close"); // the rest of the body is not read
-            case UNAVAILABLE -> answer.with("Retry-After", "5");
+            case UNAVAILABLE -> answer.with("Retry-After", SOON);
+            case TOO_MANY -> answer.with("Retry-After", WHEN_A_JOB_MAY_BE_FINISHED);
             default -> answer;
         };
     }

@@ -50,6 +50,10 @@ record Route(
         return new Route("PUT", path, JSON, JSON, Work.HEAVY, false, handler);
     }
 
+    static Route delete(String path, Handler handler) {
+        return new Route("DELETE", path, List.of(), JSON, Work.HEAVY, false, handler);
+    }
+
     Route reading(String... mediaTypes) {
         return new Route(method, path, List.of(mediaTypes), writes, work, open, handler);
     }

@@ -25,6 +25,7 @@ public final class ControlRoom {
     private final MakePlan makePlan;
     private final ReadPlans readPlans;
     private final ComputeRighting computeRighting;
+    private final Jobs jobs;
     private final CheckHealth checkHealth;
 
     /**
@@ -54,6 +55,7 @@ public final class ControlRoom {
         this.makePlan = new MakePlan(shelf, readConditions, plans, source);
         this.readPlans = new ReadPlans(database, readConditions, plans);
         this.computeRighting = new ComputeRighting(shelf, evaluateCondition, readConditions, source);
+        this.jobs = new Jobs(database, clock, ids);
         this.checkHealth = new CheckHealth(database, engineVersion);
     }
 
@@ -125,6 +127,11 @@ public final class ControlRoom {
     /** Computes righting arms. */
     public ComputeRighting computeRighting() {
         return computeRighting;
+    }
+
+    /** Works on long computations, from {@link Jobs#begin} on. */
+    public Jobs jobs() {
+        return jobs;
     }
 
     /** Checks health. */

@@ -18,6 +18,8 @@ public enum Reason {
     TOO_SLOW(408, "Request too slow"),
     /** Another write came first. */
     CONFLICT(409, "Conflict"),
+    /** A job has no result, or none yet. */
+    NO_RESULT(409, "No result"),
     /** What the client knows is no longer so. */
     STALE(412, "Stale revision"),
     /** The body is too large. */
@@ -28,6 +30,8 @@ public enum Reason {
     IMPOSSIBLE(422, "Impossible request"),
     /** The idempotency key has been used for another request. */
     KEY_REUSED(422, "Idempotency key reused"),
+    /** As much is being worked on as can wait. */
+    TOO_MANY(429, "Too many jobs"),
     /** A bug. */
     INTERNAL(500, "Internal error"),
     /** Not now. */

@@ -19,6 +19,11 @@ public record Reply(int status, Optional<String> location, Optional<String> etag
         return new Reply(201, Optional.of(location), Optional.empty(), AnswerJson.text(content), false);
     }
 
+    /** What was stored is being worked on, and its address tells how far that is. */
+    public static Reply accepted(String location, Object content) {
+        return new Reply(202, Optional.of(location), Optional.empty(), AnswerJson.text(content), false);
+    }
+
     /** Nothing was stored. */
     public static Reply ok(Object content) {
         return new Reply(200, Optional.empty(), Optional.empty(), AnswerJson.text(content), false);

@@ -109,6 +109,35 @@ public final class Database implements AutoCloseable {
     }
 
     /**
+     * Does work in one transaction as {@link #inTransaction} does, but does not wait until it is on disk: for what a power cut makes
+     * worthless anyway, as signs of life.
+     *
+     * @param work what to do; repositories take its handle
+     * @return what the work returns
+     * @param <T> of that type
+     * @throws JdbiException when the database fails
+     */
+    public <T> T inPassing(Function<Handle, T> work) {
+        return jdbi.inTransaction(work::apply);
+    }
+
+    /**
+     * Has something done when the transaction of a handle has ended.
+     *
+     * @param committed done when it is committed, before it is known to be on disk
+     * @param undone done when it is rolled back
+     */
+    public static void whenEnded(Handle handle, Runnable committed, Runnable undone) {
+        handle.afterCommit(committed);
+        handle.afterRollback(undone);
+    }
+
+    /** Whether no other process can have this database open. */
+    public boolean exclusive() {
+        return engine.exclusive(pool.getJdbcUrl());
+    }
+
+    /**
      * Reads from one snapshot of the database.
      *
      * @param work what to read

@@ -77,6 +77,15 @@ enum Engine {
         });
     }
 
+    /** Whether nobody but this process can have the database open that an address names: H2 locks its file, unless told not to. */
+    boolean exclusive(String url) {
+        String settings = url.toUpperCase(Locale.ROOT);
+        return this == H2_FILE
+                && completed(url).startsWith(H2_FILE_PREFIX)
+                && !settings.contains(";AUTO_SERVER=TRUE")
+                && !settings.contains(";FILE_LOCK=NO");
+    }
+
     /** The statement that sets how long one transaction waits for a row that another holds. */
     String lockTimeout(int milliseconds) {
         return (this == POSTGRESQL ? "SET lock_timeout = " : "SET LOCK_TIMEOUT ") + milliseconds;

@@ -7,7 +7,7 @@ import java.time.Instant;
 import java.time.OffsetDateTime;
 import java.time.ZoneOffset;
 import java.time.temporal.ChronoUnit;
-import java.util.Objects;
+import java.util.Optional;
 import org.jdbi.v3.core.argument.AbstractArgumentFactory;
 import org.jdbi.v3.core.argument.Argument;
 import org.jdbi.v3.core.config.ConfigRegistry;
@@ -31,7 +31,11 @@ final class InstantBinding extends AbstractArgumentFactory<Instant> {
 
     /** Reads a column that is never null. */
     static Instant read(ResultSet row, String column) throws SQLException {
-        return Objects.requireNonNull(row.getObject(column, OffsetDateTime.class), column)
-                .toInstant();
+        return readOptional(row, column).orElseThrow(() -> new IllegalStateException(column + " is null"));
+    }
+
+    /** Reads a column that may be null. */
+    static Optional<Instant> readOptional(ResultSet row, String column) throws SQLException {
+        return Optional.ofNullable(row.getObject(column, OffsetDateTime.class)).map(OffsetDateTime::toInstant);
     }
 }

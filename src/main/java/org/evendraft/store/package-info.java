@@ -1,6 +1,6 @@
 /**
- * What is kept, in H2 or PostgreSQL: platforms by revision, soundings, conditions with their results, plans, and answers to
- * requests that may be repeated. Repositories work on a Jdbi handle, so that a use case composes several in one transaction
+ * What is kept, in H2 or PostgreSQL: platforms by revision, soundings, conditions with their results, plans, jobs, and answers
+ * to requests that may be repeated. Repositories work on a Jdbi handle, so that a use case composes several in one transaction
  * of {@link org.evendraft.store.Database}. Units and axes as everywhere: m, t, t/m³, degrees, minutes; times are UTC and kept
  * to the microsecond.
  */

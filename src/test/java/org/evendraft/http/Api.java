@@ -81,6 +81,10 @@ final class Api {
         return send("PUT", path, BodyPublishers.ofString(json), withJson(headers));
     }
 
+    Reply delete(String path, String... headers) {
+        return send("DELETE", path, BodyPublishers.noBody(), headers);
+    }
+
     private static String[] withJson(String... headers) {
         String[] all = Arrays.copyOf(headers, headers.length + 2);
         all[headers.length] = "Content-Type";

@@ -17,13 +17,16 @@ final class TestService implements AutoCloseable {
     static final String VERSION = "9.9.9";
 
     private final Database database;
+    private final ControlRoom room;
     private final HttpServer server;
-    private Instant now = START;
+    private volatile Instant now = START;
 
     private TestService(Options options) {
         this.database = Database.open("jdbc:h2:mem:" + UUID.randomUUID(), "sa", "");
         Supplier<String> ids = () -> UUID.randomUUID().toString();
-        this.server = HttpServer.start(options, new ControlRoom(database, new TestClock(), ids, VERSION));
+        this.room = new ControlRoom(database, new TestClock(), ids, VERSION);
+        room.jobs().begin();
+        this.server = HttpServer.start(options, room);
     }
 
     static TestService start() {
@@ -50,6 +53,10 @@ final class TestService implements AutoCloseable {
         return server.port();
     }
 
+    ControlRoom room() {
+        return room;
+    }
+
     Database database() {
         return database;
     }
@@ -62,6 +69,7 @@ final class TestService implements AutoCloseable {
     @Override
     public void close() {
         server.close();
+        room.jobs().close();
         database.close();
     }
 

@@ -27,6 +27,20 @@ final class EngineTest {
     }
 
     @Test
+    void aFileBelongsToOneProcessUnlessItsAddressSaysOtherwise() {
+        assertThat(Engine.H2_FILE.exclusive("jdbc:h2:file:./data/store")).isTrue();
+        assertThat(Engine.H2_FILE.exclusive(Engine.H2_FILE.completed("jdbc:h2:./data/store")))
+                .isTrue();
+        assertThat(Engine.H2_FILE.exclusive("jdbc:h2:file:./data/store;auto_server=true"))
+                .isFalse();
+        assertThat(Engine.H2_FILE.exclusive("jdbc:h2:file:./data/store;FILE_LOCK=NO"))
+                .isFalse();
+        assertThat(Engine.H2_FILE.exclusive("jdbc:h2:tcp://localhost/store")).isFalse();
+        assertThat(Engine.POSTGRESQL.exclusive("jdbc:postgresql://localhost/evendraft"))
+                .isFalse();
+    }
+
+    @Test
     void anotherDatabaseIsRefusedByName() {
         assertThatThrownBy(() -> Engine.of("jdbc:sqlite:x"))
                 .isInstanceOf(IllegalArgumentException.class)

@@ -12,7 +12,12 @@ import org.junit.jupiter.api.TestInstance;
 /** Every contract of the store, to be run on each engine; the process runs in a zone that no database session has. */
 @TestInstance(TestInstance.Lifecycle.PER_CLASS)
 abstract class RepositoryContract
-        implements PlatformContract, SoundingContract, ConditionContract, PlanContract, IdempotencyContract {
+        implements PlatformContract,
+                SoundingContract,
+                ConditionContract,
+                PlanContract,
+                IdempotencyContract,
+                JobContract {
     private final TimeZone usualZone = TimeZone.getDefault();
     private Optional<Database> database = Optional.empty();
 
@@ -38,6 +43,6 @@ abstract class RepositoryContract
 
     @Test
     void healthTellsTheLastMigration() {
-        assertThat(database().health()).isEqualTo(new Health(true, Optional.of("5")));
+        assertThat(database().health()).isEqualTo(new Health(true, Optional.of("6")));
     }
 }
