@@ -1,7 +1,6 @@
 package org.evendraft.service;
 
 import java.time.Duration;
-import java.util.ArrayList;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
@@ -156,8 +155,7 @@ final class JobRunner {
         outcome(task).ifPresentOrElse(end -> conclude(task, end), () -> forget(task));
     }
 
-    // The edge of the work: whatever goes wrong in it must end the job. Empty when the job was finished while it
-    // waited.
+    // The edge of the work: whatever goes wrong in it must end the job. Empty for a job finished while it waited.
     private Optional<JobEnd> outcome(JobTask task) {
         try {
             if (task.stopped()) {
@@ -228,10 +226,8 @@ final class JobRunner {
             open = false;
         }
         end(watch);
-        workers.shutdown();
-        List<Runnable> waiting = new ArrayList<>();
-        workers.getQueue().drainTo(waiting);
         tasks().forEach(JobTask::stop);
+        workers.getQueue().clear();
         end(workers);
         tasks().forEach(task -> conclude(task, task.kept().orElse(new JobEnd.Failed(JobLedger.STOPPED))));
     }
