@@ -32,9 +32,18 @@ record Console(PrintStream out, PrintStream err) {
         print(out, text);
     }
 
+    /** Prints a text that has its line ends. */
+    void text(String text) {
+        write(out, text);
+    }
+
     private static void print(PrintStream stream, String text) {
-        byte[] line = (text + "\n").getBytes(StandardCharsets.UTF_8);
-        stream.write(line, 0, line.length);
+        write(stream, text + "\n");
+    }
+
+    private static void write(PrintStream stream, String text) {
+        byte[] bytes = text.getBytes(StandardCharsets.UTF_8);
+        stream.write(bytes, 0, bytes.length);
         stream.flush();
     }
 }

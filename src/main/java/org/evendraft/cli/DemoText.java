@@ -8,6 +8,7 @@ import java.util.regex.Pattern;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import java.util.stream.StreamSupport;
+import org.evendraft.service.TextTable;
 
 /** A condition and a plan in words and short tables. */
 final class DemoText {

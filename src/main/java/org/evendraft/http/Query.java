@@ -12,13 +12,14 @@ import java.util.OptionalInt;
 import java.util.Set;
 import org.evendraft.platform.Faults;
 import org.evendraft.platform.FaultyDocumentException;
+import org.evendraft.service.Parameters;
 import org.evendraft.store.PageRequest;
 
 /**
  * Reads the parameters of a query; whatever is wrong is gathered, a stand-in is returned, and {@link #done()}, which must come before
  * anything is used, tells all of it at once.
  */
-final class Query {
+final class Query implements Parameters {
     private static final int USUAL_PAGE = 50;
     private static final int LONGEST_PAGE = 1000;
     private static final int LAST_OFFSET = 1_000_000_000;
@@ -32,7 +33,8 @@ final class Query {
     }
 
     /** A text, if it is given. */
-    Optional<String> text(String name) {
+    @Override
+    public Optional<String> text(String name) {
         known.add(name);
         List<String> values = given.getOrDefault(name, List.of());
         if (values.size() > 1) {
@@ -113,7 +115,8 @@ final class Query {
     }
 
     /** Adds a fault. */
-    void fault(String name, String detail) {
+    @Override
+    public void fault(String name, String detail) {
         faults.form("", "parameter " + name + " " + detail);
     }
 

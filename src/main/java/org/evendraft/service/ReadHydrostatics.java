@@ -3,12 +3,11 @@ package org.evendraft.service;
 import com.fasterxml.jackson.annotation.JsonUnwrapped;
 import java.util.List;
 import org.evendraft.platform.FaultyDocumentException;
-import org.evendraft.platform.PreparedPlatform;
+import org.evendraft.platform.Platform;
 import org.evendraft.stability.HydrostaticRow;
 import org.evendraft.stability.Hydrostatics;
-import org.evendraft.stability.Waterplane;
 
-/** Hydrostatics of a stored platform in its own water, by draft, heel and trim. */
+/** Hydrostatics of a platform by draft, heel and trim, in its own water unless another density is asked for. */
 public final class ReadHydrostatics {
     private final PlatformShelf shelf;
     private final Provenance.Source source;
@@ -19,65 +18,50 @@ public final class ReadHydrostatics {
     }
 
     /**
-     * A table by draft. Component names are those of the JSON.
+     * A row and where it comes from, on one level of JSON.
      *
+     * @param row the row
      * @param waterDensity density of the water (t/m³)
-     * @param rows one row for each draft
      * @param provenance where the figures come from
      */
-    public record HydrostaticTable(
+    public record TracedRow(
+            @JsonUnwrapped HydrostaticRow row,
             double waterDensity,
-            List<HydrostaticRow> rows,
-            @JsonUnwrapped Provenance provenance) {
+            @JsonUnwrapped Provenance provenance) {}
 
-        /** Copies the list. */
-        public HydrostaticTable {
-            rows = List.copyOf(rows);
+    /**
+     * A table of a stored platform.
+     *
+     * @throws Refusal when there is no such platform
+     * @throws FaultyDocumentException when no part of the hull is under water at one of the waterplanes
+     */
+    public HydrostaticTable table(String platform, HydrostaticRequest request) {
+        return table(shelf.current(platform), request, source);
+    }
+
+    /**
+     * The only row of a table, as an answer of its own.
+     *
+     * @param table a table of one row
+     */
+    public static TracedRow single(HydrostaticTable table) {
+        return new TracedRow(table.rows().get(0), table.waterDensity(), table.provenance());
+    }
+
+    /**
+     * A table of a platform that need not be stored.
+     *
+     * @throws FaultyDocumentException when no part of the hull is under water at one of the waterplanes
+     */
+    public static HydrostaticTable table(PlatformAtRevision at, HydrostaticRequest request, Provenance.Source source) {
+        Platform platform = at.prepared().platform();
+        double density = request.waterDensity().orElse(platform.waterDensity());
+        List<HydrostaticRow> rows = Hydrostatics.table(at.prepared().hull(), density, request.grid());
+        if (request.digits().isPresent()) {
+            rows = rows.stream()
+                    .map(new HydrostaticRounding(request.digits().getAsInt())::of)
+                    .toList();
         }
-    }
-
-    /**
-     * Drafts from one to another, both included, at one heel and trim.
-     *
-     * @param from first draft (m)
-     * @param to last draft, at least the first (m)
-     * @param step between drafts, over 0 (m)
-     * @param heelAngle starboard down positive (degrees)
-     * @param trimAngle bow down positive (degrees)
-     */
-    public record Drafts(double from, double to, double step, double heelAngle, double trimAngle) {}
-
-    /**
-     * The row at a draft of a platform that need not be stored.
-     *
-     * @throws FaultyDocumentException when no part of the hull is under water
-     */
-    public static HydrostaticRow row(PreparedPlatform prepared, Waterplane at) {
-        return Hydrostatics.row(prepared.hull(), prepared.platform().waterDensity(), at);
-    }
-
-    /**
-     * The row at a draft.
-     *
-     * @throws Refusal when there is no such platform
-     * @throws FaultyDocumentException when no part of the hull is under water
-     */
-    public HydrostaticRow row(String platform, Waterplane at) {
-        return row(shelf.current(platform).prepared(), at);
-    }
-
-    /**
-     * A table.
-     *
-     * @throws Refusal when there is no such platform
-     * @throws FaultyDocumentException when no part of the hull is under water at one of the drafts
-     */
-    public HydrostaticTable table(String platform, Drafts drafts) {
-        PlatformAtRevision current = shelf.current(platform);
-        double density = current.prepared().platform().waterDensity();
-        Waterplane inclined = Waterplane.ofDegrees(drafts.from(), drafts.heelAngle(), drafts.trimAngle());
-        List<HydrostaticRow> rows = Hydrostatics.table(
-                current.prepared().hull(), density, drafts.from(), drafts.to(), drafts.step(), inclined);
-        return new HydrostaticTable(density, rows, source.of(current.revision()));
+        return new HydrostaticTable(platform.id(), platform.name(), density, rows, source.of(at.revision()));
     }
 }

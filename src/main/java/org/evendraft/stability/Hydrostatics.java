@@ -1,6 +1,5 @@
 package org.evendraft.stability;
 
-import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import org.evendraft.geometry.Assembly;
@@ -13,6 +12,7 @@ import org.evendraft.platform.FaultyDocumentException;
 public final class Hydrostatics {
     private static final double ONE_DEGREE = Math.tan(Math.toRadians(1));
     private static final double CENTIMETRES = 100;
+    private static final double DEGREE_DECIMALS = 1e12;
 
     private Hydrostatics() {}
 
@@ -28,9 +28,7 @@ public final class Hydrostatics {
         Cut cut = hull.below(at.plane());
         double volume = cut.volume();
         if (!(volume > 0)) {
-            throw FaultyDocumentException.impossible(
-                    "",
-                    String.format(Locale.ROOT, "At a draft of %.3f m no part of the hull is under water.", at.draft()));
+            throw dry(at);
         }
         double displacement = waterDensity * volume;
         SecondMoments inertia = cut.secondMoments();
@@ -40,8 +38,8 @@ public final class Hydrostatics {
         double bmL = inertia.longitudinal() / volume;
         return new HydrostaticRow(
                 at.draft(),
-                at.heelAngle(),
-                at.trimAngle(),
+                given(at.heelAngle()),
+                given(at.trimAngle()),
                 volume,
                 displacement,
                 buoyancy,
@@ -60,20 +58,34 @@ public final class Hydrostatics {
     }
 
     /**
-     * Rows from one draft to another, both included, at one heel and trim.
+     * The rows of a table, by trim, then heel, then draft.
      *
-     * @param from first draft (m)
-     * @param to last draft, at least the first (m)
-     * @param step between drafts, positive (m)
+     * @param hull the hull
+     * @param waterDensity density of the water (t/m³)
+     * @param grid the drafts, heels and trims
+     * @throws FaultyDocumentException when no part of the hull is under water at one of them
      */
-    public static List<HydrostaticRow> table(
-            Assembly hull, double waterDensity, double from, double to, double step, Waterplane inclined) {
-        int steps = (int) Math.ceil((to - from) / step - 1e-9);
-        List<HydrostaticRow> rows = new ArrayList<>();
-        for (int i = 0; i <= steps; i++) {
-            double draft = Math.min(from + i * step, to);
-            rows.add(row(hull, waterDensity, new Waterplane(draft, inclined.heelRad(), inclined.trimRad())));
-        }
-        return rows;
+    public static List<HydrostaticRow> table(Assembly hull, double waterDensity, HydrostaticGrid grid) {
+        return grid.waterplanes().stream()
+                .map(at -> row(hull, waterDensity, at))
+                .toList();
+    }
+
+    private static FaultyDocumentException dry(Waterplane at) {
+        String inclined = at.heelRad() == 0 && at.trimRad() == 0
+                ? ""
+                : String.format(Locale.ROOT, ", a heel of %.2f° and a trim of %.2f°", at.heelAngle(), at.trimAngle());
+        return FaultyDocumentException.impossible(
+                "",
+                String.format(
+                        Locale.ROOT,
+                        "At a draft of %.3f m%s no part of the hull is under water.",
+                        at.draft(),
+                        inclined));
+    }
+
+    /** An angle as it was given: the way to radians and back leaves a last digit. */
+    private static double given(double degrees) {
+        return Math.rint(degrees * DEGREE_DECIMALS) / DEGREE_DECIMALS;
     }
 }

@@ -13,6 +13,7 @@ import java.nio.file.Path;
 import java.time.Clock;
 import java.util.Optional;
 import java.util.UUID;
+import java.util.stream.Stream;
 import org.evendraft.platform.Json;
 import org.evendraft.service.ControlRoom;
 import org.evendraft.store.Database;
@@ -73,6 +74,79 @@ class ProgramTest {
         JsonNode row = json(out());
         assertThat(row.path("displacedVolume").doubleValue()).isCloseTo(8000, within(1e-6));
         assertThat(row.path("heelAngle").doubleValue()).isCloseTo(1.5, within(1e-12));
+    }
+
+    @Test
+    void hydrostaticsPrintsATableInThreeForms() throws IOException {
+        String[] table = {
+            "hydrostatics",
+            "--platform",
+            file("p.json", PLATFORM),
+            "--from",
+            "3",
+            "--to",
+            "4",
+            "--step",
+            "1",
+            "--heel",
+            "-2:2:2",
+            "--trim",
+            "-1,0",
+            "--format"
+        };
+        assertThat(runWith(table, "json", "--water-density", "1.025")).isZero();
+        JsonNode json = json(out());
+        assertThat(json.path("rows")).hasSize(12);
+        assertThat(json.path("rows").path(11).path("displacedVolume").doubleValue())
+                .isCloseTo(8000, within(1e-8));
+        assertThat(json.path("rows").path(0).path("displacement").doubleValue()).isCloseTo(6150, within(1e-8));
+        assertThat(json.path("platformRevision").intValue()).isZero();
+        assertThat(json.path("engineVersion").textValue()).isEqualTo("1.2.3");
+        assertThat(json.path("caution").textValue()).isNotBlank();
+        out.reset();
+        assertThat(runWith(table, "csv", "--digits", "2")).isZero();
+        assertThat(out().lines()).hasSize(13).element(1).asString().startsWith("3.00,-2.00,-1.00,6000,6000,");
+        out.reset();
+        assertThat(runWith(table, "text")).isZero();
+        assertThat(out()).contains("box (box), not stored", "Trim -1°, heel -2°", "Planning aid only");
+        assertThat(err()).isEmpty();
+    }
+
+    private int runWith(String[] args, String... more) {
+        return run(Stream.concat(Stream.of(args), Stream.of(more)).toArray(String[]::new));
+    }
+
+    @Test
+    void hydrostaticsTellsAllThatIsWrongWithItsOptions() throws IOException {
+        String platform = file("p.json", PLATFORM);
+        assertThat(run("hydrostatics", "--platform", platform)).isEqualTo(2);
+        assertThat(json(err()).path("errors").findValuesAsText("detail"))
+                .containsExactly("option --draft must be given, or from, to and step for a table");
+        err.reset();
+        String[] wrong = {
+            "--draft",
+            "4",
+            "--from",
+            "3",
+            "--to",
+            "2",
+            "--step",
+            "0",
+            "--heel",
+            "0,,1",
+            "--trim",
+            "nan",
+            "--water-density",
+            "-1",
+            "--format",
+            "pdf"
+        };
+        assertThat(runWith(new String[] {"hydrostatics", "--platform", platform}, wrong))
+                .isEqualTo(2);
+        assertThat(json(err()).path("errors").findValuesAsText("detail"))
+                .extracting(detail -> detail.split(" ", 3)[1])
+                .containsExactly("--draft", "--to", "--step", "--heel", "--trim", "--water-density", "--format");
+        assertThat(out()).isEmpty();
     }
 
     /** Wall-sided formula by hand: 100 × 20 m at 3 m, KB 1.5, BM 400/36, KG 5 m. */

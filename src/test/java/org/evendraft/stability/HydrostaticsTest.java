@@ -2,6 +2,7 @@ package org.evendraft.stability;
 
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.assertThatThrownBy;
+import static org.assertj.core.api.Assertions.tuple;
 import static org.assertj.core.api.Assertions.within;
 
 import java.util.List;
@@ -48,15 +49,38 @@ class HydrostaticsTest {
     }
 
     @Test
-    void aTableReachesBothItsEnds() {
+    void aTableIsOrderedByTrimThenHeelThenDraft() {
         Assembly hull = of(Solid.box(new Vec3(-30, -6, 0), new Vec3(30, 6, 8)));
-        List<HydrostaticRow> rows = Hydrostatics.table(hull, 1.025, 1, 2.25, 0.5, new Waterplane(0, 0, 0));
-        assertThat(rows).extracting(HydrostaticRow::draft).containsExactly(1.0, 1.5, 2.0, 2.25);
+        HydrostaticGrid grid = new HydrostaticGrid(List.of(3.0, 4.0), List.of(-3.0, 0.0, 7.0), List.of(0.0, 1.1));
+        List<HydrostaticRow> rows = Hydrostatics.table(hull, 1.025, grid);
+        assertThat(grid.count()).isEqualTo(12);
+        assertThat(rows)
+                .extracting(HydrostaticRow::trimAngle, HydrostaticRow::heelAngle, HydrostaticRow::draft)
+                .containsExactly(
+                        tuple(0.0, -3.0, 3.0),
+                        tuple(0.0, -3.0, 4.0),
+                        tuple(0.0, 0.0, 3.0),
+                        tuple(0.0, 0.0, 4.0),
+                        tuple(0.0, 7.0, 3.0),
+                        tuple(0.0, 7.0, 4.0),
+                        tuple(1.1, -3.0, 3.0),
+                        tuple(1.1, -3.0, 4.0),
+                        tuple(1.1, 0.0, 3.0),
+                        tuple(1.1, 0.0, 4.0),
+                        tuple(1.1, 7.0, 3.0),
+                        tuple(1.1, 7.0, 4.0));
+        // Between keel and deck a wall-sided box at rest about its middle keeps its volume.
         assertThat(rows).allSatisfy(r -> assertThat(r.displacedVolume()).isCloseTo(720 * r.draft(), within(1e-9)));
-        assertThat(Hydrostatics.table(hull, 1.025, 0.1, 0.3, 0.1, new Waterplane(0, 0, 0)))
-                .hasSize(3);
-        assertThat(Hydrostatics.table(hull, 1.025, 2, 2, 0.1, new Waterplane(0, 0, 0)))
-                .hasSize(1);
+    }
+
+    @Test
+    void stepsReachBothEndsInPlainDecimals() {
+        assertThat(HydrostaticGrid.steps(1, 2.25, 0.5)).containsExactly(1.0, 1.5, 2.0, 2.25);
+        assertThat(HydrostaticGrid.steps(0.1, 0.5, 0.1)).containsExactly(0.1, 0.2, 0.3, 0.4, 0.5);
+        assertThat(HydrostaticGrid.steps(-0.2, 0.1, 0.1)).containsExactly(-0.2, -0.1, 0.0, 0.1);
+        assertThat(HydrostaticGrid.steps(0, 1, 1 / 3.0)).hasSize(4).endsWith(1.0);
+        assertThat(HydrostaticGrid.steps(2, 2, 0.1)).containsExactly(2.0);
+        assertThat(HydrostaticGrid.steps(2, 2.05, 0.1)).containsExactly(2.0, 2.05);
     }
 
     @Test
@@ -67,5 +91,7 @@ class HydrostaticsTest {
                 .hasMessageContaining("under water");
         assertThatThrownBy(() -> Hydrostatics.row(hull, 1.025, new Waterplane(0, 0, 0)))
                 .isInstanceOf(FaultyDocumentException.class);
+        assertThatThrownBy(() -> Hydrostatics.row(hull, 1.025, Waterplane.ofDegrees(-10, 30, 0.5)))
+                .hasMessageContaining("a heel of 30.00° and a trim of 0.50°");
     }
 }
