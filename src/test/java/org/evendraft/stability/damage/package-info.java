@@ -1,0 +1,5 @@
+/** Checks of generated damage cases. */
+@NullMarked
+package org.evendraft.stability.damage;
+
+import org.jspecify.annotations.NullMarked;
