@@ -1,5 +1,6 @@
 package org.evendraft.platform;
 
+import com.fasterxml.jackson.databind.JsonNode;
 import java.util.ArrayList;
 import java.util.EnumSet;
 import java.util.HashSet;
@@ -8,7 +9,7 @@ import java.util.List;
 import java.util.Set;
 
 /** Reads the damage cases of a platform. */
-final class DamageCaseReader {
+public final class DamageCaseReader {
     private static final String FLOODED = "flooded";
 
     private final Set<String> known = new LinkedHashSet<>();
@@ -44,6 +45,20 @@ final class DamageCaseReader {
             cases.add(reader.damageCase(fields));
         }
         return cases;
+    }
+
+    /**
+     * Reads one damage case that is not among those of the platform's document.
+     *
+     * @param document an object as the document lists them
+     * @throws FaultyDocumentException with all faults
+     */
+    public static DamageCase read(JsonNode document, Platform platform) {
+        Faults faults = new Faults();
+        DamageCase read = new DamageCaseReader(platform.tanks(), platform.compartments())
+                .damageCase(Fields.of(document, "", faults));
+        faults.throwIfAny();
+        return read;
     }
 
     private DamageCase damageCase(Fields fields) {

@@ -271,6 +271,23 @@ public final class Fields {
         return has(name) ? numbers(name, width, range) : Optional.empty();
     }
 
+    /** A list of numbers that must be there with at least one; those with faults are left out. */
+    public List<Double> numberList(String name, Range range) {
+        int before = faults.count();
+        List<Double> numbers = new ArrayList<>();
+        int i = 0;
+        for (JsonNode element : elements(name)) {
+            double number = number(pointer(name) + "/" + i++, "each entry of " + name, element, range);
+            if (!Double.isNaN(number)) {
+                numbers.add(number);
+            }
+        }
+        if (i == 0 && faults.count() == before) {
+            form(name, name + " must have at least one entry");
+        }
+        return numbers;
+    }
+
     /** A list of lists of numbers, as an outline or a curve; lists with faults are left out. */
     public List<double[]> rows(String name, int width, Range range) {
         List<double[]> rows = new ArrayList<>();

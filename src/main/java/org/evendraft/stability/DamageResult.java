@@ -10,6 +10,7 @@ import org.jspecify.annotations.Nullable;
  * A platform with spaces open to the sea. Component names are those of the JSON answer.
  *
  * @param damageCase id of the case
+ * @param why where the case comes from
  * @param situation by which criteria it is judged
  * @param flooded ids of the tanks and compartments open to the sea
  * @param lostContent what the flooded tanks held and is lost to the sea (t)
@@ -21,6 +22,7 @@ import org.jspecify.annotations.Nullable;
  */
 public record DamageResult(
         String damageCase,
+        String why,
         Situation situation,
         List<String> flooded,
         double lostContent,

@@ -21,15 +21,17 @@ public final class DamageStability {
      * What becomes of a platform in a damage case.
      *
      * @param intact the platform before
+     * @param why where the case comes from, in a sentence
      * @param modeWind wind speed for criteria that give none of their own (m/s)
      */
-    public static DamageResult judge(LoadedPlatform intact, DamageCase damage, OptionalDouble modeWind) {
+    public static DamageResult judge(LoadedPlatform intact, DamageCase damage, String why, OptionalDouble modeWind) {
         LoadedPlatform damaged = intact.withFlooded(damage.flooded());
         Equilibrium found = damaged.floatingPosition();
         double lost = intact.mass() - damaged.mass();
         if (!(found instanceof Afloat afloat)) {
             return new DamageResult(
                     damage.id(),
+                    why,
                     damage.situation(),
                     damage.flooded(),
                     lost,
@@ -43,6 +45,7 @@ public final class DamageStability {
         Waterplane at = afloat.waterplane();
         return new DamageResult(
                 damage.id(),
+                why,
                 damage.situation(),
                 damage.flooded(),
                 lost,

@@ -22,4 +22,9 @@ public record KgRequest(
         drafts = List.copyOf(drafts);
         damageCases = List.copyOf(damageCases);
     }
+
+    /** The same with other damage to be survived. */
+    public KgRequest surviving(List<DamageCase> cases) {
+        return new KgRequest(mode, drafts, windSpeed, waterDensity, cases);
+    }
 }

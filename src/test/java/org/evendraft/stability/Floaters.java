@@ -8,6 +8,7 @@ import org.evendraft.geometry.Mesh;
 import org.evendraft.geometry.Solid;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Body;
+import org.evendraft.platform.Compartment;
 import org.evendraft.platform.Condition;
 import org.evendraft.platform.Condition.FreeSurface;
 import org.evendraft.platform.Fill;
@@ -59,6 +60,26 @@ public final class Floaters {
                 List.of(),
                 List.of(),
                 List.of(),
+                StabilityRules.NONE,
+                List.of()));
+    }
+
+    /** A platform of a hull and a lightship with one compartment that may flood, permeability 1. */
+    public static PreparedPlatform flooding(List<Body> hull, double mass, Vec3 centre, Body compartment) {
+        return new PreparedPlatform(new Platform(
+                "test",
+                "Test",
+                1.025,
+                hull,
+                List.of(),
+                new Lightship(mass, centre),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(new Compartment(compartment.name(), List.of(compartment), 1)),
                 StabilityRules.NONE,
                 List.of()));
     }
