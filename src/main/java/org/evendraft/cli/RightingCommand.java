@@ -6,6 +6,7 @@ import org.evendraft.service.ComputeRighting;
 import org.evendraft.service.Provenance;
 import org.evendraft.stability.LiquidTreatment;
 import org.evendraft.stability.RightingCurve;
+import org.jspecify.annotations.Nullable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -57,6 +58,12 @@ final class RightingCommand implements Callable<Integer> {
             description = "FREE (default), ACTUAL_MOMENT or MAXIMUM_MOMENT: how liquids in slack tanks are counted.")
     private LiquidTreatment liquids = LiquidTreatment.FREE;
 
+    @Option(
+            names = "--wind",
+            paramLabel = "V",
+            description = "Wind speed (m/s) in place of that of the condition's mode.")
+    private @Nullable Double wind;
+
     RightingCommand(Launcher launcher, Console console) {
         this.launcher = launcher;
         this.console = console;
@@ -67,7 +74,8 @@ final class RightingCommand implements Callable<Integer> {
         RightingCurve.Request request = RightingCurve.Request.checked(azimuth, to, step, !fixedTrim, liquids);
         LoadingFiles.Loading loading = files.read();
         Provenance.Source source = new Provenance.Source(Clock.systemUTC(), launcher.version());
-        console.answer(ComputeRighting.curve(loading.platform(), loading.condition(), request, source));
+        console.answer(ComputeRighting.curve(
+                loading.platform(), loading.condition(), WindOption.speed(wind), request, source));
         return Console.DONE;
     }
 }

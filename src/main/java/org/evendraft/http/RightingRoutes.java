@@ -1,71 +1,88 @@
 package org.evendraft.http;
 
 import java.util.List;
-import java.util.Locale;
-import java.util.stream.Stream;
+import java.util.OptionalDouble;
 import org.evendraft.platform.Json;
 import org.evendraft.service.ComputeRighting;
 import org.evendraft.service.ControlRoom;
+import org.evendraft.service.JudgeStability;
 import org.evendraft.service.Reply;
-import org.evendraft.stability.LiquidTreatment;
 import org.evendraft.stability.RightingCurve;
 
-/** Curves of righting arms. */
+/** Curves of righting arms, the wind, and the criteria of the intact platform. */
 final class RightingRoutes {
     private final ComputeRighting compute;
+    private final JudgeStability judge;
     private final Writes writes;
 
     RightingRoutes(ControlRoom room, Writes writes) {
         this.compute = room.computeRighting();
+        this.judge = room.judgeStability();
         this.writes = writes;
     }
 
     List<Route> routes() {
         return List.of(
-                Route.post(PlatformRoutes.PLATFORM + "/righting", this::ofDocument),
-                Route.get(ConditionRoutes.CONDITION + "/righting", this::ofStored));
+                Route.post(PlatformRoutes.PLATFORM + "/righting", this::rightingOfDocument),
+                Route.get(ConditionRoutes.CONDITION + "/righting", this::rightingOfStored),
+                Route.post(PlatformRoutes.PLATFORM + "/wind", this::windOnDocument),
+                Route.get(ConditionRoutes.CONDITION + "/wind", this::windOnStored),
+                Route.post(PlatformRoutes.PLATFORM + "/criteria", this::criteriaOfDocument),
+                Route.get(ConditionRoutes.CONDITION + "/criteria", this::criteriaOfStored));
     }
 
-    private Answer ofDocument(Request request) {
+    private Answer rightingOfDocument(Request request) {
         Query query = new Query(request.query());
-        RightingCurve.Request wanted = wanted(query, query.required("azimuth"));
+        OptionalDouble wind = StabilityQuery.wind(query);
+        RightingCurve.Request wanted = StabilityQuery.curve(query, query.required("azimuth"));
         return writes.read(
                 request,
-                () -> Reply.ok(compute.curve(request.variable("platform"), Json.parse(request.body()), wanted)));
+                () -> Reply.ok(compute.curve(request.variable("platform"), Json.parse(request.body()), wind, wanted)));
     }
 
-    private Answer ofStored(Request request) {
+    private Answer rightingOfStored(Request request) {
         Query query = new Query(request.query());
         boolean one = query.hasAny("azimuth");
-        RightingCurve.Request wanted = wanted(query, query.number("azimuth").orElse(0));
+        OptionalDouble wind = StabilityQuery.wind(query);
+        RightingCurve.Request wanted =
+                StabilityQuery.curve(query, query.number("azimuth").orElse(0));
         String platform = request.variable("platform");
         String condition = request.variable("condition");
         return Answer.ok(
-                one ? compute.ofStored(platform, condition, wanted) : compute.allAround(platform, condition, wanted));
+                one
+                        ? compute.ofStored(platform, condition, wind, wanted)
+                        : compute.allAround(platform, condition, wind, wanted));
     }
 
-    private static RightingCurve.Request wanted(Query query, double azimuth) {
-        double to = query.number("to").orElse(RightingCurve.Request.USUAL_ANGLE);
-        double step = query.number("step").orElse(1);
-        boolean freeTrim = oneOf(query, "trim", "free", "free", "fixed").equals("free");
-        String treatment = oneOf(query, "liquids", "free", codes());
-        LiquidTreatment liquids = Stream.of(LiquidTreatment.values())
-                .filter(way -> Json.code(way).equals(treatment))
-                .findFirst()
-                .orElse(LiquidTreatment.FREE);
+    private Answer windOnDocument(Request request) {
+        Query query = new Query(request.query());
+        OptionalDouble wind = StabilityQuery.wind(query);
+        RightingCurve.Request wanted = StabilityQuery.curve(query, query.required("azimuth"));
+        return writes.read(
+                request,
+                () -> Reply.ok(judge.wind(request.variable("platform"), Json.parse(request.body()), wind, wanted)));
+    }
+
+    private Answer windOnStored(Request request) {
+        Query query = new Query(request.query());
+        OptionalDouble wind = StabilityQuery.wind(query);
+        RightingCurve.Request wanted = StabilityQuery.curve(query, query.required("azimuth"));
+        return Answer.ok(judge.windOnStored(request.variable("platform"), request.variable("condition"), wind, wanted));
+    }
+
+    private Answer criteriaOfDocument(Request request) {
+        Query query = new Query(request.query());
+        OptionalDouble wind = StabilityQuery.wind(query);
         query.done();
-        return RightingCurve.Request.checked(azimuth, to, step, freeTrim, liquids);
+        return writes.read(
+                request,
+                () -> Reply.ok(judge.criteria(request.variable("platform"), Json.parse(request.body()), wind)));
     }
 
-    private static String[] codes() {
-        return Stream.of(LiquidTreatment.values()).map(Json::code).toArray(String[]::new);
-    }
-
-    private static String oneOf(Query query, String name, String otherwise, String... words) {
-        String given = query.text(name).orElse(otherwise);
-        if (!List.of(words).contains(given)) {
-            query.fault(name, String.format(Locale.ROOT, "must be one of %s", String.join(", ", words)));
-        }
-        return given;
+    private Answer criteriaOfStored(Request request) {
+        Query query = new Query(request.query());
+        OptionalDouble wind = StabilityQuery.wind(query);
+        query.done();
+        return Answer.ok(judge.criteriaOfStored(request.variable("platform"), request.variable("condition"), wind));
     }
 }

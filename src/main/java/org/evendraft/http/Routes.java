@@ -19,6 +19,8 @@ final class Routes {
                         new TableRoutes(room, writes).routes(),
                         new ConditionRoutes(room, writes).routes(),
                         new RightingRoutes(room, writes).routes(),
+                        new DamageRoutes(room, writes).routes(),
+                        new KgRoutes(room, writes).routes(),
                         new PlanRoutes(room, writes).routes(),
                         new JobRoutes(room).routes())
                 .flatMap(List::stream)

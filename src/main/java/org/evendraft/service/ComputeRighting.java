@@ -3,43 +3,35 @@ package org.evendraft.service;
 import com.fasterxml.jackson.annotation.JsonUnwrapped;
 import com.fasterxml.jackson.databind.JsonNode;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.stream.IntStream;
 import org.evendraft.platform.Condition;
-import org.evendraft.platform.ConditionReader;
 import org.evendraft.platform.FaultyDocumentException;
-import org.evendraft.stability.Evaluation;
-import org.evendraft.stability.LoadedPlatform;
-import org.evendraft.stability.RightingArms;
+import org.evendraft.service.Loadings.Loading;
+import org.evendraft.stability.AxisAnswer;
 import org.evendraft.stability.RightingCurve;
-import org.evendraft.store.StoredCondition;
 
-/** Computes curves of righting arms. */
+/** Computes curves of righting arms, with the wind, the openings and the criteria judged by them. */
 public final class ComputeRighting {
     /** Between the axes of {@link #allAround} (degrees). */
     private static final int AZIMUTH_STEP = 10;
 
-    private final PlatformShelf shelf;
-    private final EvaluateCondition evaluate;
-    private final ReadConditions readConditions;
+    private final Loadings loadings;
     private final Provenance.Source source;
 
-    ComputeRighting(
-            PlatformShelf shelf, EvaluateCondition evaluate, ReadConditions readConditions, Provenance.Source source) {
-        this.shelf = shelf;
-        this.evaluate = evaluate;
-        this.readConditions = readConditions;
+    ComputeRighting(Loadings loadings, Provenance.Source source) {
+        this.loadings = loadings;
         this.source = source;
     }
 
     /**
      * A curve and where it comes from, on one level of JSON.
      *
-     * @param curve the curve
+     * @param answer the curve and what is judged by it
      * @param provenance where it comes from
      */
     public record TracedCurve(
-            @JsonUnwrapped RightingCurve curve,
-            @JsonUnwrapped Provenance provenance) {}
+            @JsonUnwrapped AxisAnswer answer, @JsonUnwrapped Provenance provenance) {}
 
     /**
      * Curves about axes all around. Component names are those of the JSON.
@@ -48,7 +40,7 @@ public final class ComputeRighting {
      * @param provenance where they come from
      */
     public record TracedCurves(
-            List<RightingCurve> curves, @JsonUnwrapped Provenance provenance) {
+            List<AxisAnswer> curves, @JsonUnwrapped Provenance provenance) {
 
         /** Copies the list. */
         public TracedCurves {
@@ -59,12 +51,13 @@ public final class ComputeRighting {
     /**
      * The curve of a condition of a stored platform.
      *
+     * @param windSpeed wind in place of the mode's (m/s)
      * @throws Refusal when there is no such platform
      * @throws FaultyDocumentException with all that is wrong with the condition, or when the platform sinks or capsizes
      */
-    public TracedCurve curve(String platform, JsonNode document, RightingCurve.Request request) {
-        EvaluateCondition.Outcome outcome = evaluate.outcome(platform, document);
-        return curve(outcome.platform(), outcome.condition(), request, source);
+    public TracedCurve curve(
+            String platform, JsonNode document, OptionalDouble windSpeed, RightingCurve.Request request) {
+        return curve(loadings.given(platform, document), windSpeed, request, source);
     }
 
     /**
@@ -72,10 +65,9 @@ public final class ComputeRighting {
      *
      * @throws Refusal when there is no such platform or condition
      */
-    public TracedCurve ofStored(String platform, String condition, RightingCurve.Request request) {
-        StoredCondition stored = readConditions.stored(platform, condition);
-        PlatformAtRevision at = shelf.at(platform, stored.platformRevision());
-        return curve(at, loading(stored, at), request, source);
+    public TracedCurve ofStored(
+            String platform, String condition, OptionalDouble windSpeed, RightingCurve.Request request) {
+        return curve(loadings.stored(platform, condition), windSpeed, request, source);
     }
 
     /**
@@ -84,19 +76,14 @@ public final class ComputeRighting {
      * @param like what each curve shall be, but for its azimuth
      * @throws Refusal when there is no such platform or condition
      */
-    public TracedCurves allAround(String platform, String condition, RightingCurve.Request like) {
-        StoredCondition stored = readConditions.stored(platform, condition);
-        PlatformAtRevision at = shelf.at(platform, stored.platformRevision());
-        LoadedPlatform loaded = floating(at, loading(stored, at));
-        List<RightingCurve> curves = IntStream.range(0, 360 / AZIMUTH_STEP)
+    public TracedCurves allAround(
+            String platform, String condition, OptionalDouble windSpeed, RightingCurve.Request like) {
+        Loading loading = loadings.stored(platform, condition);
+        List<AxisAnswer> curves = IntStream.range(0, 360 / AZIMUTH_STEP)
                 .parallel()
-                .mapToObj(i -> RightingArms.curve(loaded, like.about(i * (double) AZIMUTH_STEP)))
+                .mapToObj(i -> answer(loading, windSpeed, like.about(i * (double) AZIMUTH_STEP)))
                 .toList();
-        return new TracedCurves(curves, source.of(at.revision()));
-    }
-
-    private static Condition loading(StoredCondition stored, PlatformAtRevision at) {
-        return ConditionReader.read(StoredJson.tree(stored.document()), at.prepared());
+        return new TracedCurves(curves, source.of(loading.platform().revision()));
     }
 
     /**
@@ -105,14 +92,23 @@ public final class ComputeRighting {
      * @throws FaultyDocumentException when the platform sinks or capsizes
      */
     public static TracedCurve curve(
-            PlatformAtRevision platform, Condition condition, RightingCurve.Request request, Provenance.Source source) {
-        RightingCurve curve = RightingArms.curve(floating(platform, condition), request);
-        return new TracedCurve(curve, source.of(platform.revision()));
+            PlatformAtRevision platform,
+            Condition condition,
+            OptionalDouble windSpeed,
+            RightingCurve.Request request,
+            Provenance.Source source) {
+        return curve(Loading.of(platform, condition), windSpeed, request, source);
     }
 
-    private static LoadedPlatform floating(PlatformAtRevision platform, Condition condition) {
-        LoadedPlatform loaded = LoadedPlatform.of(platform.prepared(), condition);
-        Evaluation.afloat(loaded);
-        return loaded;
+    private static TracedCurve curve(
+            Loading loading, OptionalDouble windSpeed, RightingCurve.Request request, Provenance.Source source) {
+        return new TracedCurve(
+                answer(loading, windSpeed, request),
+                source.of(loading.platform().revision()));
+    }
+
+    private static AxisAnswer answer(Loading loading, OptionalDouble windSpeed, RightingCurve.Request request) {
+        return AxisAnswer.of(
+                loading.loaded(), loading.afloat(), loading.condition().mode(), windSpeed, request);
     }
 }

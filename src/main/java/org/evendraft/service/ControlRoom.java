@@ -26,6 +26,9 @@ public final class ControlRoom {
     private final ReadPlans readPlans;
     private final ComputeRighting computeRighting;
     private final Jobs jobs;
+    private final JudgeStability judgeStability;
+    private final JudgeDamage judgeDamage;
+    private final ComputeAllowableKg computeAllowableKg;
     private final CheckHealth checkHealth;
 
     /**
@@ -54,8 +57,12 @@ public final class ControlRoom {
         PlanRepository plans = new PlanRepository(clock, ids);
         this.makePlan = new MakePlan(shelf, readConditions, plans, source);
         this.readPlans = new ReadPlans(database, readConditions, plans);
-        this.computeRighting = new ComputeRighting(shelf, evaluateCondition, readConditions, source);
         this.jobs = new Jobs(database, clock, ids);
+        Loadings loadings = new Loadings(shelf, evaluateCondition, readConditions);
+        this.computeRighting = new ComputeRighting(loadings, source);
+        this.judgeStability = new JudgeStability(loadings, source);
+        this.judgeDamage = new JudgeDamage(loadings, jobs, source);
+        this.computeAllowableKg = new ComputeAllowableKg(shelf, storePlatform, jobs, source);
         this.checkHealth = new CheckHealth(database, engineVersion);
     }
 
@@ -132,6 +139,21 @@ public final class ControlRoom {
     /** Works on long computations, from {@link Jobs#begin} on. */
     public Jobs jobs() {
         return jobs;
+    }
+
+    /** Judges stability. */
+    public JudgeStability judgeStability() {
+        return judgeStability;
+    }
+
+    /** Judges damage. */
+    public JudgeDamage judgeDamage() {
+        return judgeDamage;
+    }
+
+    /** Computes the greatest KG. */
+    public ComputeAllowableKg computeAllowableKg() {
+        return computeAllowableKg;
     }
 
     /** Checks health. */
