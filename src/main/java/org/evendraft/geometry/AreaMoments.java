@@ -13,8 +13,8 @@ package org.evendraft.geometry;
 record AreaMoments(double area, double p, double q, double pp, double pq, double qq) {
     static final AreaMoments NONE = new AreaMoments(0, 0, 0, 0, 0, 0);
 
-    AreaMoments minus(AreaMoments o) {
-        return new AreaMoments(area - o.area, p - o.p, q - o.q, pp - o.pp, pq - o.pq, qq - o.qq);
+    AreaMoments plus(AreaMoments o) {
+        return new AreaMoments(area + o.area, p + o.p, q + o.q, pp + o.pp, pq + o.pq, qq + o.qq);
     }
 
     /** The same area, about a point that lies at (−dp, −dq) of the present one. */

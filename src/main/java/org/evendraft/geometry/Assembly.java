@@ -10,7 +10,11 @@ public final class Assembly {
     private static final double VOLUME_TOLERANCE = 1e-13;
 
     private final List<Part> parts;
+    /** The same parts, for loops that shall make no iterator. */
+    private final Part[] run;
+
     private final double volume;
+    private final boolean shortCuts;
 
     /**
      * A body with its weight.
@@ -32,10 +36,21 @@ public final class Assembly {
 
     /** All parts together. */
     public Assembly(List<Part> parts) {
+        this(parts, true);
+    }
+
+    private Assembly(List<Part> parts, boolean shortCuts) {
         this.parts = List.copyOf(parts);
+        this.run = parts.toArray(new Part[0]);
+        this.shortCuts = shortCuts;
         this.volume = this.parts.stream()
                 .mapToDouble(part -> part.weight() * part.solid().volume())
                 .sum();
+    }
+
+    /** The same without short cuts, every triangle clipped for every plane: slow, for comparison. */
+    public Assembly byTriangles() {
+        return new Assembly(parts, false);
     }
 
     /** The parts. */
@@ -61,19 +76,23 @@ public final class Assembly {
     /** The integrals under a plane. */
     public Cut below(Plane plane) {
         Cut cut = new Cut(plane);
-        for (Part part : parts) {
-            part.solid().addBelow(cut, part.weight());
-        }
+        gather(cut);
         return cut;
+    }
+
+    private void gather(Cut cut) {
+        for (Part part : run) {
+            if (shortCuts) {
+                part.solid().addBelow(cut, part.weight());
+            } else {
+                part.solid().addBelowByTriangles(cut, part.weight());
+            }
+        }
     }
 
     /** The same by clipping every triangle: slow, for comparison. */
     public Cut belowByTriangles(Plane plane) {
-        Cut cut = new Cut(plane);
-        for (Part part : parts) {
-            part.solid().addBelowByTriangles(cut, part.weight());
-        }
-        return cut;
+        return byTriangles().below(plane);
     }
 
     /** The corner of the box round all parts with the least coordinates (m). */
@@ -116,51 +135,75 @@ public final class Assembly {
      * @throws IllegalArgumentException when the volume is negative or more than the whole
      */
     public Cut holding(double target, double slopeX, double slopeY, double guess) {
+        Cut cut = new Cut(Plane.ofSlopes(0, slopeX, slopeY));
+        hold(cut, target, guess);
+        return cut;
+    }
+
+    /**
+     * Moves a cut, its slopes kept, to the height at which a given volume lies under its plane, as {@link #holding} finds it.
+     *
+     * @param cut what was gathered in it is let go
+     * @param target volume under the plane (m³), from 0 to the whole
+     * @param guess height of the plane over the origin to start from (m); not a number when there is none
+     * @throws IllegalArgumentException when the volume is negative or more than the whole
+     */
+    public void hold(Cut cut, double target, double guess) {
         if (!(target >= 0) || target > volume) {
             throw new IllegalArgumentException("volume " + target + " of " + volume + " m³");
         }
-        double low = lowest(slopeX, slopeY);
-        double high = highest(slopeX, slopeY);
-        double c = guess > low && guess < high ? guess : low + (high - low) * target / volume;
-        Cut cut = below(Plane.ofSlopes(c, slopeX, slopeY));
+        double c = guess;
+        if (!Double.isNaN(guess) && meets(cut, target, c)) {
+            return;
+        }
+        double low = lowest(cut.slopeX(), cut.slopeY());
+        double high = highest(cut.slopeX(), cut.slopeY());
+        if (!(c > low && c < high)) {
+            c = low + (high - low) * target / volume;
+            gatherAt(cut, c);
+        }
         for (int i = 0; i < MOST_STEPS; i++) {
             double excess = cut.volume() - target;
             if (Math.abs(excess) <= VOLUME_TOLERANCE * volume || high - low <= Math.ulp(high) * 4) {
-                return cut;
+                return;
             }
             if (excess > 0) {
                 high = c;
             } else {
                 low = c;
             }
-            double step = excess / (cut.area() * cut.plane().normal().z());
+            double step = excess / (cut.area() * cut.normal().z());
             if (Math.abs(step) <= Math.ulp(c)) {
-                return cut;
+                return;
             }
             c = c - step > low && c - step < high ? c - step : (low + high) / 2;
-            cut = below(Plane.ofSlopes(c, slopeX, slopeY));
+            gatherAt(cut, c);
         }
-        return cut;
+    }
+
+    /** Moves the cut, and tells whether it then has the volume: so it is at once where the guess is a good one. */
+    private boolean meets(Cut cut, double target, double heightOverOrigin) {
+        gatherAt(cut, heightOverOrigin);
+        return Math.abs(cut.volume() - target) <= VOLUME_TOLERANCE * volume;
+    }
+
+    private void gatherAt(Cut cut, double heightOverOrigin) {
+        cut.restart(heightOverOrigin);
+        gather(cut);
     }
 
     private double lowest(double slopeX, double slopeY) {
         double least = Double.POSITIVE_INFINITY;
-        for (Part part : parts) {
-            Vec3 a = part.solid().least();
-            Vec3 b = part.solid().greatest();
-            double c = a.z() - Math.max(slopeX * a.x(), slopeX * b.x()) - Math.max(slopeY * a.y(), slopeY * b.y());
-            least = Math.min(least, c);
+        for (Part part : run) {
+            least = Math.min(least, part.solid().lowest(slopeX, slopeY));
         }
         return least;
     }
 
     private double highest(double slopeX, double slopeY) {
         double greatest = Double.NEGATIVE_INFINITY;
-        for (Part part : parts) {
-            Vec3 a = part.solid().least();
-            Vec3 b = part.solid().greatest();
-            double c = b.z() - Math.min(slopeX * a.x(), slopeX * b.x()) - Math.min(slopeY * a.y(), slopeY * b.y());
-            greatest = Math.max(greatest, c);
+        for (Part part : run) {
+            greatest = Math.max(greatest, part.solid().highest(slopeX, slopeY));
         }
         return greatest;
     }

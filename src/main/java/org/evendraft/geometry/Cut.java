@@ -6,13 +6,14 @@ package org.evendraft.geometry;
  *
  * <p>Volume integrals are taken over the wetted surface by the divergence theorem about the plane's origin, so that the section
  * itself contributes nothing (Mirtich, Fast and Accurate Computation of Polyhedral Mass Properties, J. Graphics Tools 1(2), 1996);
- * section integrals along its edges by Green's theorem. One thread at a time; made for one plane, thrown away after.
+ * section integrals along its edges by Green's theorem. One thread at a time. Only {@link Assembly#hold} moves a cut to another
+ * plane, of the same slopes: so that a search makes no object for each plane it tries.
  */
 public final class Cut {
-    private final Plane plane;
-    private final double ox;
-    private final double oy;
-    private final double oz;
+    private final Vec3 normal;
+    private final Vec3 first;
+    private final Vec3 second;
+    private double oz;
     private double volume;
     private double momentX;
     private double momentY;
@@ -24,18 +25,71 @@ public final class Cut {
     private double suv;
     private double svv;
     private double[] heights = {};
+    private final Passage passage = new Passage(this);
 
     /** Nothing gathered yet under this plane. */
     public Cut(Plane plane) {
-        this.plane = plane;
-        this.ox = plane.origin().x();
-        this.oy = plane.origin().y();
+        this.normal = plane.normal();
+        this.first = plane.first();
+        this.second = plane.second();
         this.oz = plane.origin().z();
+    }
+
+    /** Lets everything go that was gathered, and begins again under a plane of the same slopes at another height (m). */
+    void restart(double heightOverOrigin) {
+        oz = heightOverOrigin;
+        volume = 0;
+        momentX = 0;
+        momentY = 0;
+        momentZ = 0;
+        area = 0;
+        su = 0;
+        sv = 0;
+        suu = 0;
+        suv = 0;
+        svv = 0;
     }
 
     /** The plane. */
     public Plane plane() {
-        return plane;
+        return new Plane(origin(), normal, first, second);
+    }
+
+    /** The upward unit normal of the plane. */
+    public Vec3 normal() {
+        return normal;
+    }
+
+    Vec3 first() {
+        return first;
+    }
+
+    Vec3 second() {
+        return second;
+    }
+
+    Vec3 origin() {
+        return new Vec3(0, 0, oz);
+    }
+
+    /** Height of the plane over the platform's origin (m). */
+    public double heightOverOrigin() {
+        return oz;
+    }
+
+    /** Rise of the plane per metre forward. */
+    double slopeX() {
+        return -normal.x() / normal.z();
+    }
+
+    /** Rise of the plane per metre to port. */
+    double slopeY() {
+        return -normal.y() / normal.z();
+    }
+
+    /** The signed distance of a point over the plane (m). */
+    double height(Vec3 point) {
+        return point.x() * normal.x() + point.y() * normal.y() + (point.z() - oz) * normal.z();
     }
 
     /** Volume under the plane (m³). */
@@ -45,12 +99,12 @@ public final class Cut {
 
     /** First moments of the volume about the platform's origin (m⁴). */
     public Vec3 moment() {
-        return new Vec3(momentX + ox * volume, momentY + oy * volume, momentZ + oz * volume);
+        return new Vec3(momentX, momentY, momentZ + oz * volume);
     }
 
     /** Centroid of the volume (m); not a number when the volume is 0. */
     public Vec3 centroid() {
-        return new Vec3(momentX / volume + ox, momentY / volume + oy, momentZ / volume + oz);
+        return new Vec3(momentX / volume, momentY / volume, momentZ / volume + oz);
     }
 
     /** Area of the section, in its own plane (m²). */
@@ -60,44 +114,44 @@ public final class Cut {
 
     /** Centroid of the section (m); the plane's origin when the area is 0. */
     public Vec3 sectionCentroid() {
-        if (area == 0) {
-            return plane.origin();
-        }
-        return plane.origin()
-                .plus(plane.first().times(su / area))
-                .plus(plane.second().times(sv / area));
+        double per = area == 0 ? 0 : 1 / area;
+        return origin().plus(first.times(su * per)).plus(second.times(sv * per));
     }
 
     /** Second moments of the section about its own centroid, in its own plane. */
     public SecondMoments secondMoments() {
-        if (area == 0) {
-            return SecondMoments.NONE;
-        }
-        return new SecondMoments(svv - sv * sv / area, suu - su * su / area, suv - su * sv / area);
+        double per = area == 0 ? 0 : 1 / area;
+        double any = area == 0 ? 0 : 1;
+        return new SecondMoments(any * svv - sv * sv * per, any * suu - su * su * per, any * suv - su * sv * per);
     }
 
     /** Area of the section seen from above, on the plane z = 0 (m²). */
     public double projectedArea() {
-        return area * plane.normal().z();
+        return area * normal.z();
     }
 
     /** Second moments of the section seen from above, on the plane z = 0 along x and y, about its own centroid. */
     public SecondMoments projectedSecondMoments() {
         SecondMoments own = secondMoments();
-        double nz = plane.normal().z();
-        double ux = plane.first().x();
-        double vx = plane.second().x();
-        double vy = plane.second().y();
+        double nz = normal.z();
+        double ux = first.x();
+        double vx = second.x();
+        double vy = second.y();
         return new SecondMoments(
                 nz * vy * vy * own.transverse(),
                 nz * (ux * ux * own.longitudinal() + 2 * ux * vx * own.product() + vx * vx * own.transverse()),
                 nz * vy * (ux * own.product() + vx * own.transverse()));
     }
 
+    /** Adds what of a prism lies under the plane. */
+    void addPrism(double sign, Extrusion prism) {
+        passage.through(prism, sign);
+    }
+
     void addWhole(double sign, double bodyVolume, Vec3 bodyMoment) {
         volume += sign * bodyVolume;
-        momentX += sign * (bodyMoment.x() - ox * bodyVolume);
-        momentY += sign * (bodyMoment.y() - oy * bodyVolume);
+        momentX += sign * bodyMoment.x();
+        momentY += sign * bodyMoment.y();
         momentZ += sign * (bodyMoment.z() - oz * bodyVolume);
     }
 
@@ -139,11 +193,11 @@ public final class Cut {
         if (heights.length < n) {
             heights = new double[n];
         }
-        double nx = plane.normal().x();
-        double ny = plane.normal().y();
-        double nz = plane.normal().z();
+        double nx = normal.x();
+        double ny = normal.y();
+        double nz = normal.z();
         for (int i = 0, k = 0; i < n; i++, k += 3) {
-            heights[i] = (xyz[k] - ox) * nx + (xyz[k + 1] - oy) * ny + (xyz[k + 2] - oz) * nz;
+            heights[i] = xyz[k] * nx + xyz[k + 1] * ny + (xyz[k + 2] - oz) * nz;
         }
         return heights;
     }
@@ -151,29 +205,29 @@ public final class Cut {
     private void addTriangle(double sign, double[] xyz, int a, int b, int c) {
         addTetrahedron(
                 sign,
-                xyz[3 * a] - ox,
-                xyz[3 * a + 1] - oy,
+                xyz[3 * a],
+                xyz[3 * a + 1],
                 xyz[3 * a + 2] - oz,
-                xyz[3 * b] - ox,
-                xyz[3 * b + 1] - oy,
+                xyz[3 * b],
+                xyz[3 * b + 1],
                 xyz[3 * b + 2] - oz,
-                xyz[3 * c] - ox,
-                xyz[3 * c + 1] - oy,
+                xyz[3 * c],
+                xyz[3 * c + 1],
                 xyz[3 * c + 2] - oz);
     }
 
     /** The triangle a, b, c with only a wet: the corner at a is added, and its edge in the plane. */
     private void addOneWet(double sign, double[] xyz, double[] h, int a, int b, int c) {
-        double ax = xyz[3 * a] - ox;
-        double ay = xyz[3 * a + 1] - oy;
+        double ax = xyz[3 * a];
+        double ay = xyz[3 * a + 1];
         double az = xyz[3 * a + 2] - oz;
         double s = h[a] / (h[a] - h[b]);
-        double px = ax + s * (xyz[3 * b] - ox - ax);
-        double py = ay + s * (xyz[3 * b + 1] - oy - ay);
+        double px = ax + s * (xyz[3 * b] - ax);
+        double py = ay + s * (xyz[3 * b + 1] - ay);
         double pz = az + s * (xyz[3 * b + 2] - oz - az);
         double t = h[a] / (h[a] - h[c]);
-        double qx = ax + t * (xyz[3 * c] - ox - ax);
-        double qy = ay + t * (xyz[3 * c + 1] - oy - ay);
+        double qx = ax + t * (xyz[3 * c] - ax);
+        double qy = ay + t * (xyz[3 * c + 1] - ay);
         double qz = az + t * (xyz[3 * c + 2] - oz - az);
         addTetrahedron(sign, ax, ay, az, px, py, pz, qx, qy, qz);
         addEdge(sign, qx, qy, qz, px, py, pz);
@@ -181,14 +235,14 @@ public final class Cut {
 
     /** The triangle a, b, c with a and b wet: the quadrilateral under the plane is added, and its edge in the plane. */
     private void addTwoWet(double sign, double[] xyz, double[] h, int a, int b, int c) {
-        double ax = xyz[3 * a] - ox;
-        double ay = xyz[3 * a + 1] - oy;
+        double ax = xyz[3 * a];
+        double ay = xyz[3 * a + 1];
         double az = xyz[3 * a + 2] - oz;
-        double bx = xyz[3 * b] - ox;
-        double by = xyz[3 * b + 1] - oy;
+        double bx = xyz[3 * b];
+        double by = xyz[3 * b + 1];
         double bz = xyz[3 * b + 2] - oz;
-        double cx = xyz[3 * c] - ox;
-        double cy = xyz[3 * c + 1] - oy;
+        double cx = xyz[3 * c];
+        double cy = xyz[3 * c + 1];
         double cz = xyz[3 * c + 2] - oz;
         double s = h[b] / (h[b] - h[c]);
         double px = bx + s * (cx - bx);
@@ -224,8 +278,8 @@ public final class Cut {
 
     /** A directed edge of the section from p to q, the section on its left seen from above. */
     private void addEdge(double sign, double px, double py, double pz, double qx, double qy, double qz) {
-        Vec3 e = plane.first();
-        Vec3 f = plane.second();
+        Vec3 e = first;
+        Vec3 f = second;
         double u0 = px * e.x() + py * e.y() + pz * e.z();
         double v0 = px * f.x() + py * f.y() + pz * f.z();
         double u1 = qx * e.x() + qy * e.y() + qz * e.z();

@@ -6,29 +6,62 @@ package org.evendraft.geometry;
  * and the chord that the line makes, by its ends.
  */
 final class HalfPlane {
-    private final double a;
-    private final double b;
-    private final double c;
+    private double a;
+    private double b;
+    private double c;
     /** The point of the line nearest to the centre. */
-    private final double op;
+    private double op;
 
-    private final double oq;
-    private double area;
-    private double mp;
-    private double mq;
-    private double mpp;
-    private double mpq;
-    private double mqq;
+    private double oq;
+    /** Whether the chord is asked for. */
+    private boolean withChord;
+    /** Twice the area, six times the first moments, 12 and (pq) 24 times the second, about that point. */
+    private double twice;
+
+    private double sixP;
+    private double sixQ;
+    private double twelvePp;
+    private double twentyfourPq;
+    private double twelveQq;
     private double chord;
     private double chordFirst;
     private double chordSecond;
+    /** What round corners add to the straight stretches between their ends, about the centre. */
+    private double roundArea;
+
+    private double roundP;
+    private double roundQ;
+    private double roundPp;
+    private double roundPq;
+    private double roundQq;
 
     HalfPlane(double c, double a, double b) {
-        this.c = c;
-        this.a = a;
-        this.b = b;
-        this.op = -c * a;
-        this.oq = -c * b;
+        restart(c, a, b, false);
+    }
+
+    /** Lets everything go that was gathered, and begins again on one side of another line, with its chord or without. */
+    void restart(double newC, double newA, double newB, boolean chordToo) {
+        c = newC;
+        a = newA;
+        b = newB;
+        op = -c * a;
+        oq = -c * b;
+        withChord = chordToo;
+        twice = 0;
+        sixP = 0;
+        sixQ = 0;
+        twelvePp = 0;
+        twentyfourPq = 0;
+        twelveQq = 0;
+        chord = 0;
+        chordFirst = 0;
+        chordSecond = 0;
+        roundArea = 0;
+        roundP = 0;
+        roundQ = 0;
+        roundPp = 0;
+        roundPq = 0;
+        roundQq = 0;
     }
 
     /** Signed distance of a point from the line, positive inside (m). */
@@ -46,7 +79,9 @@ final class HalfPlane {
 
     /** Moments of what was gathered, about the centre. */
     AreaMoments moments() {
-        return new AreaMoments(area, mp, mq, mpp, mpq, mqq).about(op, oq);
+        return new AreaMoments(twice / 2, sixP / 6, sixQ / 6, twelvePp / 12, twentyfourPq / 24, twelveQq / 12)
+                .about(op, oq)
+                .plus(new AreaMoments(roundArea, roundP, roundQ, roundPp, roundPq, roundQq));
     }
 
     /** Length of the chord (m). */
@@ -76,8 +111,14 @@ final class HalfPlane {
      * Each stretch inside adds its end and takes off its beginning, seen along the line: where stretches follow each other that
      * cancels, and what remains are the ends of the chord, which runs from where the outline enters to where it leaves.
      */
-    private void addEnd(double sign, double p, double q) {
-        double w = a * (q - oq) - b * (p - op);
+    private void addEnds(double p0, double q0, double p1, double q1) {
+        if (withChord) {
+            addEnd(-1, a * (q0 - oq) - b * (p0 - op));
+            addEnd(1, a * (q1 - oq) - b * (p1 - op));
+        }
+    }
+
+    private void addEnd(double sign, double w) {
         chord += sign * w;
         chordFirst += sign * w * w / 2;
         chordSecond += sign * w * w * w / 3;
@@ -85,19 +126,28 @@ final class HalfPlane {
 
     /** Adds a straight stretch of outline that lies inside. */
     void addStraight(double p0, double q0, double p1, double q1) {
-        addEnd(-1, p0, q0);
-        addEnd(1, p1, q1);
+        addEnds(p0, q0, p1, q1);
         double u0 = p0 - op;
         double v0 = q0 - oq;
         double u1 = p1 - op;
         double v1 = q1 - oq;
-        double twice = u0 * v1 - u1 * v0;
-        area += twice / 2;
-        mp += twice * (u0 + u1) / 6;
-        mq += twice * (v0 + v1) / 6;
-        mpp += twice * (u0 * u0 + u0 * u1 + u1 * u1) / 12;
-        mqq += twice * (v0 * v0 + v0 * v1 + v1 * v1) / 12;
-        mpq += twice * (u0 * v1 + 2 * u0 * v0 + 2 * u1 * v1 + u1 * v0) / 24;
+        double k = u0 * v1 - u1 * v0;
+        twice += k;
+        sixP += k * (u0 + u1);
+        sixQ += k * (v0 + v1);
+        twelvePp += k * (u0 * u0 + u0 * u1 + u1 * u1);
+        twelveQq += k * (v0 * v0 + v0 * v1 + v1 * v1);
+        twentyfourPq += k * (u0 * v1 + 2 * u0 * v0 + 2 * u1 * v1 + u1 * v0);
+    }
+
+    /** Adds what lies between a straight stretch that was added and an arc with the same ends, known about the centre. */
+    void addSegment(AreaMoments segment) {
+        roundArea += segment.area();
+        roundP += segment.p();
+        roundQ += segment.q();
+        roundPp += segment.pp();
+        roundPq += segment.pq();
+        roundQq += segment.qq();
     }
 
     /**
@@ -111,8 +161,7 @@ final class HalfPlane {
         double c0 = Math.cos(from);
         double s1 = Math.sin(to);
         double c1 = Math.cos(to);
-        addEnd(-1, centreP + r * c0, centreQ + r * s0);
-        addEnd(1, centreP + r * c1, centreQ + r * s1);
+        addEnds(centreP + r * c0, centreQ + r * s0, centreP + r * c1, centreQ + r * s1);
         double i1 = to - from;
         double ic = s1 - s0;
         double is = c0 - c1;
@@ -132,11 +181,11 @@ final class HalfPlane {
         double fcc = k * icc + kc * iccc + ks * iccs;
         double fcs = k * ics + kc * iccs + ks * icss;
         double fss = k * iss + kc * icss + ks * isss;
-        area += f1 / 2;
-        mp += (cp * f1 + r * fc) / 3;
-        mq += (cq * f1 + r * fs) / 3;
-        mpp += (cp * cp * f1 + 2 * cp * r * fc + r * r * fcc) / 4;
-        mqq += (cq * cq * f1 + 2 * cq * r * fs + r * r * fss) / 4;
-        mpq += (cp * cq * f1 + r * (cp * fs + cq * fc) + r * r * fcs) / 4;
+        twice += f1;
+        sixP += 2 * (cp * f1 + r * fc);
+        sixQ += 2 * (cq * f1 + r * fs);
+        twelvePp += 3 * (cp * cp * f1 + 2 * cp * r * fc + r * r * fcc);
+        twelveQq += 3 * (cq * cq * f1 + 2 * cq * r * fs + r * r * fss);
+        twentyfourPq += 6 * (cp * cq * f1 + r * (cp * fs + cq * fc) + r * r * fcs);
     }
 }

@@ -18,22 +18,32 @@ final class Outline {
 
     private static final double SAME_POINT = 1e-9;
 
-    private final List<Stretch> stretches;
+    private final Stretch[] stretches;
     private final double centroidP;
     private final double centroidQ;
     private final AreaMoments whole;
+    private final double middleP;
+    private final double middleQ;
+    private final double halfP;
+    private final double halfQ;
 
     private Outline(List<Stretch> placed) {
         AreaMoments about = momentsOf(placed);
         this.centroidP = about.p() / about.area();
         this.centroidQ = about.q() / about.area();
         this.stretches =
-                placed.stream().map(s -> moved(s, -centroidP, -centroidQ)).toList();
-        AreaMoments central = momentsOf(stretches);
+                placed.stream().map(s -> moved(s, -centroidP, -centroidQ)).toArray(Stretch[]::new);
+        AreaMoments central = momentsOf(List.of(stretches));
         this.whole = new AreaMoments(central.area(), 0, 0, central.pp(), central.pq(), central.qq());
+        double[] p = span(1, 0);
+        double[] q = span(0, 1);
+        this.middleP = (p[0] + p[1]) / 2;
+        this.middleQ = (q[0] + q[1]) / 2;
+        this.halfP = (p[1] - p[0]) / 2;
+        this.halfQ = (q[1] - q[0]) / 2;
     }
 
-    private static AreaMoments momentsOf(List<Stretch> stretches) {
+    private static AreaMoments momentsOf(Iterable<Stretch> stretches) {
         // A line so that everything lies inside: the half plane's own point is then the origin.
         HalfPlane all = new HalfPlane(0, 0, 0);
         for (Stretch stretch : stretches) {
@@ -168,13 +178,6 @@ final class Outline {
         return centroidQ;
     }
 
-    /** What lies inside a half plane. */
-    HalfPlane inside(double c, double a, double b) {
-        HalfPlane half = new HalfPlane(c, a, b);
-        addTo(half);
-        return half;
-    }
-
     /** Adds what lies inside a half plane to it. */
     void addTo(HalfPlane half) {
         for (Stretch stretch : stretches) {
@@ -182,11 +185,21 @@ final class Outline {
         }
     }
 
-    /** Distances from a half plane's line of the places where the part inside changes its form (m). */
-    List<Double> corners(HalfPlane half) {
-        List<Double> distances = new ArrayList<>();
-        stretches.forEach(s -> s.addCorners(half, distances));
-        return distances;
+    /** Adds the distances from a half plane's line of the places where the part inside changes its form. */
+    void addCorners(HalfPlane half, SliceEnds ends) {
+        for (Stretch stretch : stretches) {
+            stretch.addCorners(half, ends);
+        }
+    }
+
+    /** How far the middle of the outline's bounding rectangle lies along a direction from the centroid (m). */
+    double middleReach(double a, double b) {
+        return a * middleP + b * middleQ;
+    }
+
+    /** No point lies further along a direction, or against it, from there (m). */
+    double halfReach(double a, double b) {
+        return Math.abs(a) * halfP + Math.abs(b) * halfQ;
     }
 
     /** Least and greatest reach along a direction from the centroid (m). */
@@ -216,7 +229,7 @@ final class Outline {
     /** Points on an arc from its start until before its end, pushed out so far that the polygon has the arc's area. */
     private static void addPoints(List<double[]> points, Stretch.Arc arc) {
         double turn = arc.to() - arc.from();
-        boolean circle = Math.abs(turn) >= 2 * Math.PI - SAME_POINT;
+        boolean circle = arc.isCircle();
         int edges = Math.max(2, (int) Math.ceil(Math.abs(turn) / STEP - SAME_POINT));
         double step = turn / edges;
         double pushed =

@@ -11,6 +11,8 @@ public final class Solid {
     private final Vec3 moment;
     private final Vec3 least;
     private final Vec3 greatest;
+    private final Vec3 middle;
+    private final Vec3 reach;
 
     private Solid(Mesh mesh, Optional<Extrusion> extrusion) {
         this.mesh = mesh;
@@ -20,6 +22,8 @@ public final class Solid {
         double[] z = span(Axis.Z.direction());
         this.least = new Vec3(x[0], y[0], z[0]);
         this.greatest = new Vec3(x[1], y[1], z[1]);
+        this.middle = least.plus(greatest).times(0.5);
+        this.reach = greatest.minus(least).times(0.5);
         if (extrusion.isPresent()) {
             this.volume = extrusion.get().volume();
             this.moment = extrusion.get().moment();
@@ -132,22 +136,37 @@ public final class Solid {
         return greatest;
     }
 
+    /**
+     * Height over the origin of a plane that stands just under the box round the body (m).
+     *
+     * @param slopeX rise of the plane per metre forward
+     * @param slopeY rise per metre to port
+     */
+    double lowest(double slopeX, double slopeY) {
+        return middle.z() - slopeX * middle.x() - slopeY * middle.y() - reach(slopeX, slopeY);
+    }
+
+    /** Height over the origin of a plane that stands just over it (m). */
+    double highest(double slopeX, double slopeY) {
+        return middle.z() - slopeX * middle.x() - slopeY * middle.y() + reach(slopeX, slopeY);
+    }
+
+    private double reach(double slopeX, double slopeY) {
+        return Math.abs(slopeX) * reach.x() + Math.abs(slopeY) * reach.y() + reach.z();
+    }
+
     /** Adds the integrals of what lies under the cut's plane, times the sign (−1 for a cut-out), by the cheapest exact way. */
     public void addBelow(Cut cut, double sign) {
-        Plane plane = cut.plane();
-        Vec3 n = plane.normal();
-        double middle = plane.height(least.plus(greatest).times(0.5));
-        double reach = (Math.abs(n.x()) * (greatest.x() - least.x())
-                        + Math.abs(n.y()) * (greatest.y() - least.y())
-                        + Math.abs(n.z()) * (greatest.z() - least.z()))
-                / 2;
-        if (middle - reach > 0) {
+        Vec3 n = cut.normal();
+        double height = cut.height(middle);
+        double over = Math.abs(n.x()) * reach.x() + Math.abs(n.y()) * reach.y() + Math.abs(n.z()) * reach.z();
+        if (height - over > 0) {
             return;
         }
-        if (middle + reach <= 0) {
+        if (height + over <= 0) {
             cut.addWhole(sign, volume, moment);
         } else if (extrusion.isPresent()) {
-            extrusion.get().addBelow(cut, sign);
+            cut.addPrism(sign, extrusion.get());
         } else {
             cut.addMesh(sign, mesh);
         }

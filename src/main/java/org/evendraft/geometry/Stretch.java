@@ -1,8 +1,5 @@
 package org.evendraft.geometry;
 
-import java.util.ArrayList;
-import java.util.List;
-
 /** A stretch of an outline, which runs anticlockwise. */
 sealed interface Stretch {
 
@@ -10,7 +7,7 @@ sealed interface Stretch {
     void addTo(HalfPlane half);
 
     /** Distance from the line of each place at which the part inside may begin, end or turn back (m). */
-    void addCorners(HalfPlane half, List<Double> distances);
+    void addCorners(HalfPlane half, SliceEnds ends);
 
     /** Its least and greatest reach along a direction (a, b) from the centre, (least, greatest) (m). */
     double[] span(double a, double b);
@@ -37,8 +34,8 @@ sealed interface Stretch {
         }
 
         @Override
-        public void addCorners(HalfPlane half, List<Double> distances) {
-            distances.add(half.inside(p0, q0));
+        public void addCorners(HalfPlane half, SliceEnds ends) {
+            ends.add(half.inside(p0, q0));
         }
 
         @Override
@@ -49,16 +46,69 @@ sealed interface Stretch {
         }
     }
 
-    /**
-     * An arc.
-     *
-     * @param p centre (m)
-     * @param q centre (m)
-     * @param r radius (m)
-     * @param from angle of its start (rad)
-     * @param to angle of its end, less than the start on a hollow corner (rad)
-     */
-    record Arc(double p, double q, double r, double from, double to) implements Stretch {
+    /** An arc, with its ends and what lies between it and its chord. */
+    final class Arc implements Stretch {
+        private static final double TURN = 2 * Math.PI;
+
+        private final double p;
+        private final double q;
+        private final double r;
+        private final double from;
+        private final double to;
+        private final double p0;
+        private final double q0;
+        private final double p1;
+        private final double q1;
+        private final AreaMoments segment;
+
+        /**
+         * @param p centre (m)
+         * @param q centre (m)
+         * @param r radius (m)
+         * @param from angle of its start (rad)
+         * @param to angle of its end, less than the start on a hollow corner (rad)
+         */
+        Arc(double p, double q, double r, double from, double to) {
+            this.p = p;
+            this.q = q;
+            this.r = r;
+            this.from = from;
+            this.to = to;
+            this.p0 = p + r * Math.cos(from);
+            this.q0 = q + r * Math.sin(from);
+            this.p1 = p + r * Math.cos(to);
+            this.q1 = q + r * Math.sin(to);
+            // Out along the arc and back along its chord, about the centre of the outline's coordinates.
+            HalfPlane round = new HalfPlane(0, 0, 0);
+            round.addArc(p, q, r, from, to);
+            round.addStraight(p1, q1, p0, q0);
+            this.segment = round.moments();
+        }
+
+        double p() {
+            return p;
+        }
+
+        double q() {
+            return q;
+        }
+
+        double r() {
+            return r;
+        }
+
+        double from() {
+            return from;
+        }
+
+        double to() {
+            return to;
+        }
+
+        /** Whether it goes all the way round. */
+        boolean isCircle() {
+            return Math.abs(to - from) >= TURN - 1e-9;
+        }
 
         @Override
         public void addTo(HalfPlane half) {
@@ -67,44 +117,46 @@ sealed interface Stretch {
                 return;
             }
             if (least <= -1) {
-                half.addArc(p, q, r, from, to);
-                return;
-            }
-            double middle = Math.atan2(half.b(), half.a());
-            double reach = Math.acos(least);
-            for (double[] part : partsInside(middle, reach)) {
-                half.addArc(p, q, r, part[0], part[1]);
+                addWhole(half);
+            } else {
+                addWithin(half, Math.atan2(half.b(), half.a()), Math.acos(least));
             }
         }
 
-        /** The parts of the arc within a reach of an angle, each in the arc's own sense. */
-        private List<double[]> partsInside(double middle, double reach) {
+        private void addWhole(HalfPlane half) {
+            half.addStraight(p0, q0, p1, q1);
+            half.addSegment(segment);
+        }
+
+        /** Adds the parts of the arc within a reach of an angle, each in the arc's own sense. */
+        private void addWithin(HalfPlane half, double middle, double reach) {
             double low = Math.min(from, to);
             double high = Math.max(from, to);
-            double turn = 2 * Math.PI;
-            List<double[]> parts = new ArrayList<>(2);
-            double start = middle - reach + turn * Math.floor((low - middle - reach) / turn);
-            for (double a = start; a < high; a += turn) {
+            double start = middle - reach + TURN * Math.floor((low - middle - reach) / TURN);
+            for (double a = start; a < high; a += TURN) {
                 double first = Math.max(a, low);
                 double last = Math.min(a + 2 * reach, high);
-                if (first < last) {
-                    parts.add(to > from ? new double[] {first, last} : new double[] {last, first});
+                if (first == low && last == high) {
+                    addWhole(half);
+                } else if (first < last) {
+                    half.addArc(p, q, r, to > from ? first : last, to > from ? last : first);
                 }
             }
-            return parts;
         }
 
         @Override
-        public void addCorners(HalfPlane half, List<Double> distances) {
-            distances.add(half.inside(p + r * Math.cos(from), q + r * Math.sin(from)));
-            distances.add(half.inside(p, q) + r);
-            distances.add(half.inside(p, q) - r);
+        public void addCorners(HalfPlane half, SliceEnds ends) {
+            if (!isCircle()) {
+                ends.add(half.inside(p0, q0));
+            }
+            ends.add(half.inside(p, q) + r);
+            ends.add(half.inside(p, q) - r);
         }
 
         @Override
         public double[] span(double a, double b) {
-            double atStart = a * (p + r * Math.cos(from)) + b * (q + r * Math.sin(from));
-            double atEnd = a * (p + r * Math.cos(to)) + b * (q + r * Math.sin(to));
+            double atStart = a * p0 + b * q0;
+            double atEnd = a * p1 + b * q1;
             double middle = a * p + b * q;
             double reach = r * Math.hypot(a, b);
             double towards = Math.atan2(b, a);
@@ -116,8 +168,7 @@ sealed interface Stretch {
 
         private boolean passes(double angle) {
             double low = Math.min(from, to);
-            double turn = 2 * Math.PI;
-            return angle + turn * Math.ceil((low - angle) / turn) <= Math.max(from, to);
+            return angle + TURN * Math.ceil((low - angle) / TURN) <= Math.max(from, to);
         }
     }
 }

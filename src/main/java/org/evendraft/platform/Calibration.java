@@ -42,6 +42,16 @@ public sealed interface Calibration permits ShapeCalibration, TableCalibration {
      */
     Inclined inclined(double volume, double slopeX, double slopeY, double guess);
 
+    /**
+     * Adds the liquid under a surface of the slopes at which liquids are gathered.
+     *
+     * @param gathered where to
+     * @param tank number of the tank there
+     * @param upright the liquid with the platform upright, as {@link #holding} tells it
+     * @param density its density (t/m³)
+     */
+    void addInclined(InclinedLiquids gathered, int tank, Liquid upright, double density);
+
     /** The greatest transverse and the greatest longitudinal second moment over all levels, each by itself; product 0 (m⁴). */
     SecondMoments greatestSurface();
 

@@ -5,6 +5,7 @@ import java.util.Collection;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.function.UnaryOperator;
 import java.util.stream.Collectors;
 import org.evendraft.geometry.Assembly;
 
@@ -26,11 +27,20 @@ public final class PreparedPlatform {
      * @param warnings sentences on what deserves attention in it
      */
     public PreparedPlatform(Platform platform, List<String> warnings) {
+        this(platform, warnings, UnaryOperator.identity());
+    }
+
+    /**
+     * Prepares a platform with its spaces changed in the way they are integrated.
+     *
+     * @param way what is made of the hull and of the shape of each tank
+     */
+    PreparedPlatform(Platform platform, List<String> warnings, UnaryOperator<Assembly> way) {
         this.warnings = List.copyOf(warnings);
         this.platform = platform;
-        this.hull = assembly(platform.hull());
+        this.hull = way.apply(assembly(platform.hull()));
         this.calibrations =
-                platform.tanks().stream().collect(Collectors.toUnmodifiableMap(Tank::id, PreparedPlatform::calibrate));
+                platform.tanks().stream().collect(Collectors.toUnmodifiableMap(Tank::id, tank -> calibrate(tank, way)));
     }
 
     /** Bodies put together. */
@@ -41,10 +51,10 @@ public final class PreparedPlatform {
     }
 
     /** The calibration of a tank: by its table where it has one, else by its shape. */
-    static Calibration calibrate(Tank tank) {
+    private static Calibration calibrate(Tank tank, UnaryOperator<Assembly> way) {
         Optional<ShapeCalibration> shape = tank.bodies().isEmpty()
                 ? Optional.empty()
-                : Optional.of(new ShapeCalibration(assembly(tank.bodies()), tank.permeability()));
+                : Optional.of(new ShapeCalibration(way.apply(assembly(tank.bodies())), tank.permeability()));
         return tank.table().isEmpty() ? shape.orElseThrow() : new TableCalibration(tank.table(), shape);
     }
 

@@ -15,6 +15,7 @@ public final class ShapeCalibration implements Calibration {
     private final Assembly shape;
     private final double permeability;
     private final double bottom;
+    private final Vec3 middle;
     private final double fullVolume;
     private final List<TableRow> table;
     private final SecondMoments greatest;
@@ -27,6 +28,7 @@ public final class ShapeCalibration implements Calibration {
         this.shape = shape;
         this.permeability = permeability;
         this.bottom = shape.lowest();
+        this.middle = shape.least().plus(shape.greatest()).times(0.5);
         this.fullVolume = permeability * shape.volume();
         this.table = new TableBuilder(shape, permeability).build();
         this.greatest = TableCalibration.greatest(table);
@@ -74,6 +76,28 @@ public final class ShapeCalibration implements Calibration {
                 moment,
                 cut.projectedSecondMoments().times(permeability),
                 cut.plane().origin().z());
+    }
+
+    @Override
+    public void addInclined(InclinedLiquids gathered, int tank, Liquid upright, double density) {
+        if (gathered.isLevel()) {
+            gathered.add(density, upright.centre().times(upright.volume()), upright.surface());
+            gathered.place(tank, new Vec3(middle.x(), middle.y(), bottom + upright.level()));
+        } else {
+            addCut(gathered, tank, upright.volume(), density);
+        }
+    }
+
+    private void addCut(InclinedLiquids gathered, int tank, double volume, double density) {
+        Cut cut = gathered.hold(tank, shape, Math.min(volume / permeability, shape.volume()));
+        gathered.add(density * permeability, cut.moment(), cut.projectedSecondMoments());
+    }
+
+    /** As {@link #addInclined}, but only by how much the liquid's moments differ from those it has upright. */
+    void addShift(InclinedLiquids gathered, int tank, double volume, double density) {
+        Vec3 still = holding(volume).centre().times(-volume);
+        addCut(gathered, tank, volume, density);
+        gathered.add(density, still, SecondMoments.NONE);
     }
 
     @Override

@@ -106,11 +106,26 @@ public final class TableCalibration implements Calibration {
             Vec3 still = shape.get().inclined(held, 0, 0, Double.NaN).moment();
             return new Inclined(moment.plus(moved.moment()).minus(still), moved.projected(), moved.height());
         }
-        SecondMoments s = upright.surface();
-        double byX = s.longitudinal() * slopeX + s.product() * slopeY;
-        double byY = s.product() * slopeX + s.transverse() * slopeY;
-        Vec3 shift = new Vec3(byX, byY, (slopeX * byX + slopeY * byY) / 2);
-        return new Inclined(moment.plus(shift), s, Double.NaN);
+        return new Inclined(moment.plus(shift(upright.surface(), slopeX, slopeY)), upright.surface(), Double.NaN);
+    }
+
+    /** By how much the first moments of the liquid in a tank with vertical walls change when its surface inclines (m⁴). */
+    private static Vec3 shift(SecondMoments surface, double slopeX, double slopeY) {
+        double byX = surface.longitudinal() * slopeX + surface.product() * slopeY;
+        double byY = surface.product() * slopeX + surface.transverse() * slopeY;
+        return new Vec3(byX, byY, (slopeX * byX + slopeY * byY) / 2);
+    }
+
+    @Override
+    public void addInclined(InclinedLiquids gathered, int tank, Liquid upright, double density) {
+        gathered.add(density, upright.centre().times(upright.volume()), SecondMoments.NONE);
+        if (shape.isPresent()) {
+            double held = Math.min(upright.volume(), shape.get().fullVolume());
+            shape.get().addShift(gathered, tank, held, density);
+        } else {
+            SecondMoments surface = upright.surface();
+            gathered.add(density, shift(surface, gathered.slopeX(), gathered.slopeY()), surface);
+        }
     }
 
     @Override

@@ -79,9 +79,14 @@ record EnergyAtSlopes(double value, Slopes gradient, double byHeelTwice, double 
 
     /** Second derivative along a unit direction of the slopes (m). */
     double curvatureAlong(Slopes u) {
-        return u.heel() * u.heel() * byHeelTwice
-                + 2 * u.heel() * u.trim() * byHeelAndTrim
-                + u.trim() * u.trim() * byTrimTwice;
+        return curvatureAlong(u, u);
+    }
+
+    /** Mixed second derivative along two unit directions of the slopes (m). */
+    double curvatureAlong(Slopes u, Slopes v) {
+        return u.heel() * v.heel() * byHeelTwice
+                + (u.heel() * v.trim() + u.trim() * v.heel()) * byHeelAndTrim
+                + u.trim() * v.trim() * byTrimTwice;
     }
 
     /** The Hessian's greater eigenvalue (m). */

@@ -1,7 +1,6 @@
 package org.evendraft.stability;
 
 import java.util.Optional;
-import org.evendraft.geometry.Plane;
 import org.evendraft.geometry.Vec3;
 
 /**
@@ -17,6 +16,9 @@ final class HeelPath {
     private static final double LONGEST_STEP = 0.1;
     /** Arm about the perpendicular axis under which the trim is at rest (m). */
     private static final double TRIM_TOLERANCE = 1e-9;
+
+    /** Two states lie on a smooth path when the tangent at one misses tan(trim) at the other by less than this. */
+    private static final double SMOOTH = 0.01;
 
     private final Slopes alongHeel;
     private final Slopes alongTrim;
@@ -40,8 +42,20 @@ final class HeelPath {
      * @return empty where the trim has no stable rest within reach
      */
     Optional<Inclination> at(Inclination near, double angleRad) {
+        return at(near, near, angleRad);
+    }
+
+    /**
+     * The platform at an angle, from two states on the path.
+     *
+     * @param near where the search for the trim starts
+     * @param other a state further off, with which the trim is foreseen
+     * @param angleRad inclination about the axis (rad)
+     * @return empty where the trim has no stable rest within reach
+     */
+    Optional<Inclination> at(Inclination near, Inclination other, double angleRad) {
         double phi = Math.tan(angleRad);
-        double tau = freeTrim ? near.slopes().dot(alongTrim) : 0;
+        double tau = freeTrim ? foreseen(near, other, phi) : 0;
         Inclination here = near.at(slopes(phi, tau));
         for (int i = 0; freeTrim && i < MOST_STEPS; i++) {
             double slope = here.energy().gradient().dot(alongTrim);
@@ -51,12 +65,40 @@ final class HeelPath {
             }
             double step = curvature > 0 ? -slope / curvature : -Math.signum(slope) * LONGEST_STEP;
             tau += Math.max(-LONGEST_STEP, Math.min(LONGEST_STEP, step));
-            here = near.at(slopes(phi, tau));
+            here = here.at(slopes(phi, tau));
             if (here.slopes().inclination() > GREATEST) {
                 return Optional.empty();
             }
         }
         return freeTrim ? Optional.empty() : Optional.of(here);
+    }
+
+    /** tan(trim) by the cubic through two states with their slopes; by one of them alone where the two lie on no smooth path. */
+    private double foreseen(Inclination near, Inclination other, double phi) {
+        double from = phi(near);
+        double step = phi(other) - from;
+        double tangent = tau(near) + slope(near) * (phi - from);
+        double miss = tau(other) - tau(near) - slope(near) * step;
+        if (step == 0 || !(Math.abs(miss) < SMOOTH)) {
+            return Math.abs(tangent - tau(near)) < LONGEST_STEP ? tangent : tau(near);
+        }
+        double part = (phi - from) / step;
+        double turn = (slope(other) - slope(near)) * step;
+        return tangent + part * part * (3 * miss - turn + part * (turn - 2 * miss));
+    }
+
+    private double phi(Inclination at) {
+        return at.slopes().dot(alongHeel);
+    }
+
+    private double tau(Inclination at) {
+        return at.slopes().dot(alongTrim);
+    }
+
+    /** Change of tan(trim) with tan(angle) for the trim to stay at rest: along it the energy's slope by the trim stays 0. */
+    private double slope(Inclination at) {
+        double curvature = at.energy().curvatureAlong(alongTrim);
+        return curvature > 0 ? -at.energy().curvatureAlong(alongHeel, alongTrim) / curvature : 0;
     }
 
     private Slopes slopes(double phi, double tau) {
@@ -75,17 +117,13 @@ final class HeelPath {
 
     /** The horizontal direction e × n towards which the platform leans, square to the axis: the lower side's. */
     Vec3 leeward(Inclination at) {
-        Plane plane = at.waterplane().plane();
-        Vec3 n = plane.normal();
+        Vec3 n = at.normal();
         Vec3 e = axis.minus(n.times(axis.dot(n))).unit();
         return e.cross(n);
     }
 
     RightingPoint point(Inclination at, double angleRad) {
         return new RightingPoint(
-                Math.toDegrees(angleRad),
-                arm(at),
-                at.waterplane().draft(),
-                Math.toDegrees(Math.atan(at.slopes().dot(alongTrim))));
+                Math.toDegrees(angleRad), arm(at), at.waterplane().draft(), Math.toDegrees(Math.atan(tau(at))));
     }
 }

@@ -73,7 +73,9 @@ public final class RightingArms {
     /** Follows the curve as far as an angle, if it goes so far. */
     private boolean reaches(double angleRad) {
         while (!ended && (first + nodes.size() - 1) * stepRad < angleRad) {
-            add(path.at(nodes.get(nodes.size() - 1), (first + nodes.size()) * stepRad));
+            int count = nodes.size();
+            Inclination before = nodes.get(Math.max(0, count - 2));
+            add(path.at(nodes.get(count - 1), before, (first + count) * stepRad));
         }
         return angleRad <= (first + nodes.size() - 1) * stepRad;
     }
@@ -132,10 +134,12 @@ public final class RightingArms {
         if (nearest * stepRad == angleRad) {
             return node(nearest);
         }
+        Inclination near = node(nearest);
+        Inclination other = node(nearest * stepRad < angleRad ? nearest + 1 : nearest - 1);
         return between.computeIfAbsent(
                 angleRad,
-                angle -> path.at(node(nearest), angle)
-                        .or(() -> path.at(node(nearest * stepRad < angle ? nearest + 1 : nearest - 1), angle))
+                angle -> path.at(near, other, angle)
+                        .or(() -> path.at(other, angle))
                         .orElseThrow(() -> new IllegalStateException("no rest at " + Math.toDegrees(angle) + "°")));
     }
 
