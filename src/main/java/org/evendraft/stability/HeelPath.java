@@ -15,7 +15,7 @@ final class HeelPath {
     private static final int MOST_STEPS = 60;
     private static final double LONGEST_STEP = 0.1;
     /** Arm about the perpendicular axis under which the trim is at rest (m). */
-    private static final double TRIM_TOLERANCE = 1e-9;
+    private static final double TRIM_TOLERANCE = 1e-10;
 
     /** Two states lie on a smooth path when the tangent at one misses tan(trim) at the other by less than this. */
     private static final double SMOOTH = 0.01;
