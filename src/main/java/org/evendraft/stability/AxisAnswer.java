@@ -70,7 +70,8 @@ public record AxisAnswer(
     /** The wind at the nodes of the curve. */
     static WindCurve windCurve(AxisStability axis, double speed) {
         RightingArms arms = axis.arms();
-        List<WindPoint> points = IntStream.range(0, arms.points().size())
+        int last = (int) Math.round(arms.endRad() / arms.stepRad());
+        List<WindPoint> points = IntStream.rangeClosed(0, last)
                 .mapToObj(i -> {
                     double angle = i * arms.stepRad();
                     WindForce force = axis.force(arms.at(angle), speed);

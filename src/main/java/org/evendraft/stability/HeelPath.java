@@ -122,8 +122,8 @@ final class HeelPath {
         return e.cross(n);
     }
 
-    RightingPoint point(Inclination at, double angleRad) {
+    RightingPoint point(Inclination at, double angleRad, double area) {
         return new RightingPoint(
-                Math.toDegrees(angleRad), arm(at), at.waterplane().draft(), Math.toDegrees(Math.atan(tau(at))));
+                Math.toDegrees(angleRad), arm(at), at.waterplane().draft(), Math.toDegrees(Math.atan(tau(at))), area);
     }
 }

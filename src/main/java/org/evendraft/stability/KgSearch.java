@@ -34,6 +34,7 @@ final class KgSearch {
 
     private final PreparedPlatform prepared;
     private final KgRequest request;
+    private final double draft;
     private final Progress progress;
     private final LoadedPlatform floating;
     private final EvenKeel evenKeel;
@@ -69,6 +70,7 @@ final class KgSearch {
     KgSearch(PreparedPlatform prepared, KgRequest request, double draft, Progress progress) {
         this.prepared = prepared;
         this.request = request;
+        this.draft = draft;
         this.progress = progress;
         this.floating = LoadedPlatform.upright(
                 prepared, request.waterDensity(), draft, prepared.hull().lowest());
@@ -223,7 +225,7 @@ final class KgSearch {
         Double azimuth = governing.azimuth();
         boolean found = limit > Double.NEGATIVE_INFINITY;
         return new KgLimit(
-                evenKeel.draft(),
+                draft,
                 floating.mass(),
                 evenKeel.km().transverse(),
                 evenKeel.km().longitudinal(),

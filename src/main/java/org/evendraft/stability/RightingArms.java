@@ -9,7 +9,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
 import java.util.function.ToDoubleFunction;
-import java.util.stream.IntStream;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
 import org.apache.commons.math3.optim.nonlinear.scalar.GoalType;
@@ -115,12 +114,17 @@ public final class RightingArms {
         return stepRad;
     }
 
-    /** The points at the nodes. */
+    /** The points at the nodes from upright on. */
     List<RightingPoint> points() {
-        int count = (int) Math.round((endRad() - startRad()) / stepRad) + 1;
-        return IntStream.range(first, first + count)
-                .mapToObj(i -> point(i * stepRad))
-                .toList();
+        int count = (int) Math.round(endRad() / stepRad) + 1;
+        List<RightingPoint> points = new ArrayList<>(count);
+        double area = 0;
+        for (int i = 0; i < count; i++) {
+            double angle = i * stepRad;
+            area += i == 0 ? 0 : area(this::arm, (i - 1) * stepRad, angle, AREA_TOLERANCE);
+            points.add(path.point(at(angle), angle, area));
+        }
+        return points;
     }
 
     /**
@@ -149,7 +153,7 @@ public final class RightingArms {
 
     /** The point at an angle on the curve (rad). */
     RightingPoint point(double angleRad) {
-        return path.point(at(angleRad), angleRad);
+        return path.point(at(angleRad), angleRad, area(this::arm, 0, angleRad, AREA_TOLERANCE));
     }
 
     /** The righting arm of the platform held at an inclination of the curve (m). */

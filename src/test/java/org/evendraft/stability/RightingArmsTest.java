@@ -8,6 +8,7 @@ import java.util.Objects;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.DoubleRange;
+import org.apache.commons.math3.analysis.integration.SimpsonIntegrator;
 import org.evendraft.geometry.Solid;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Body;
@@ -265,5 +266,19 @@ class RightingArmsTest {
                 new Fill("PA", 900, 1.025),
                 new Fill("SF", 900, 1.025),
                 new Fill("SA", 900, 1.025));
+    }
+
+    /** Wall-sided barge: the area from upright to φ is ∫sin φ·(GM + ½·BM·tan² φ), by Commons Math; differences give any part. */
+    @Test
+    void pointsCarryTheAreaFromUpright() {
+        RightingCurve curve = RightingArms.curve(loaded(Floaters.bargeAt(100, 20, 10, 5, 6)), fixed(0, 25));
+        SimpsonIntegrator rule = new SimpsonIntegrator(1e-13, 1e-13, 3, 60);
+        double to20 = rule.integrate(1_000_000, phi -> JudgedBarge.gz(6, phi), 0, Math.toRadians(20));
+        double from10 =
+                rule.integrate(1_000_000, phi -> JudgedBarge.gz(6, phi), Math.toRadians(10), Math.toRadians(20));
+        List<RightingPoint> points = curve.points();
+        assertThat(points.get(0).area()).isZero();
+        assertThat(points.get(20).area()).isCloseTo(to20, within(curve.areaTolerance()));
+        assertThat(points.get(20).area() - points.get(10).area()).isCloseTo(from10, within(curve.areaTolerance()));
     }
 }
