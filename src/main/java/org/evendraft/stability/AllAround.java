@@ -56,6 +56,10 @@ final class AllAround {
     /** What each criterion comes to on a curve. */
     List<Finding> findings(List<Criterion> criteria, RightingCurve.Request curve) {
         RightingArms arms = new RightingArms(loaded, curve, near);
+        return RightingArms.settled(() -> findings(criteria, arms));
+    }
+
+    private List<Finding> findings(List<Criterion> criteria, RightingArms arms) {
         if (!arms.exists()) {
             Finding none = Finding.broken("upright about this axis the trim finds no stable rest");
             return criteria.stream().map(c -> none).toList();

@@ -54,6 +54,16 @@ public record AxisAnswer(
             RightingCurve.Request request) {
         OptionalDouble wind = IntactStability.wind(mode, windSpeed);
         RightingArms arms = new RightingArms(loaded, request);
+        return RightingArms.settled(() -> of(loaded, afloat, mode, wind, request, arms));
+    }
+
+    private static AxisAnswer of(
+            LoadedPlatform loaded,
+            Afloat afloat,
+            Optional<Mode> mode,
+            OptionalDouble wind,
+            RightingCurve.Request request,
+            RightingArms arms) {
         Optional<AxisStability> axis = arms.exists()
                 ? Optional.of(new AxisStability(arms, loaded.prepared().platform()))
                 : Optional.empty();

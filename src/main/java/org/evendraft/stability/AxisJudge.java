@@ -60,6 +60,9 @@ final class AxisJudge {
     private Finding leastArm(double wind) {
         RightingArms arms = axis.arms();
         double near = arms.stepRad() / 2;
+        if (arms.endRad() < near) {
+            return Finding.broken("the curve ends upright, where the trim loses its rest");
+        }
         boolean rises = arms.arm(arms.at(near)) > arms.arm(arms.at(0));
         double from = rises ? axis.rest(0).orElse(0) : 0;
         double to = axis.secondIntercept(wind).orElse(arms.endRad());

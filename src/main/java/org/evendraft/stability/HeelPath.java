@@ -20,6 +20,11 @@ final class HeelPath {
     /** Two states lie on a smooth path when the tangent at one misses tan(trim) at the other by less than this. */
     private static final double SMOOTH = 0.01;
 
+    /** A change of tan(trim) beyond this in one step is a leap, unless smaller steps lead there. */
+    private static final double LEAP = 0.08;
+
+    private static final int MOST_HALVINGS = 5;
+
     private final Slopes alongHeel;
     private final Slopes alongTrim;
     private final Vec3 axis;
@@ -32,6 +37,30 @@ final class HeelPath {
         this.alongTrim = new Slopes(-sin, cos);
         this.axis = new Vec3(cos, sin, 0);
         this.freeTrim = freeTrim;
+    }
+
+    /**
+     * The platform at an angle, followed from a state on the path without a leap of the trim: in halved steps where the trim turns fast.
+     *
+     * @param from where the path is followed from
+     * @param before a state on the path further off, with which the trim is foreseen
+     * @param angleRad inclination about the axis (rad)
+     * @return empty where the path ends before: beyond a fold the trim rests elsewhere or nowhere
+     */
+    Optional<Inclination> follow(Inclination from, Inclination before, double angleRad) {
+        return follow(from, before, angleRad, MOST_HALVINGS);
+    }
+
+    private Optional<Inclination> follow(Inclination from, Inclination before, double angleRad, int halvings) {
+        Optional<Inclination> found = at(from, before, angleRad);
+        if (found.isPresent() && Math.abs(tau(found.get()) - tau(from)) <= LEAP) {
+            return found;
+        }
+        if (halvings == 0) {
+            return Optional.empty();
+        }
+        double middle = (Math.atan(phi(from)) + angleRad) / 2;
+        return follow(from, before, middle, halvings - 1).flatMap(m -> follow(m, from, angleRad, halvings - 1));
     }
 
     /**

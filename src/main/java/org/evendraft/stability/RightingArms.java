@@ -8,6 +8,7 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
+import java.util.function.Supplier;
 import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
@@ -74,7 +75,7 @@ public final class RightingArms {
         while (!ended && (first + nodes.size() - 1) * stepRad < angleRad) {
             int count = nodes.size();
             Inclination before = nodes.get(Math.max(0, count - 2));
-            add(path.at(nodes.get(count - 1), before, (first + count) * stepRad));
+            add(path.follow(nodes.get(count - 1), before, (first + count) * stepRad));
         }
         return angleRad <= (first + nodes.size() - 1) * stepRad;
     }
@@ -130,21 +131,47 @@ public final class RightingArms {
     /**
      * The platform at an angle on the curve (rad), found from the nearest node, or else from the one on the angle's other side.
      *
-     * @throws IllegalStateException when the trim finds no rest from either: no other angle's state stands in
+     * @throws LostRestException when the trim finds no rest from either: no other angle's state stands in, and from then on the curve
+     *     ends at the node before
      */
     Inclination at(double angleRad) {
-        reaches(angleRad);
+        if (!reaches(angleRad)) {
+            throw new IllegalArgumentException(Math.toDegrees(angleRad) + "° is beyond the curve");
+        }
         long nearest = Math.round(angleRad / stepRad);
         if (nearest * stepRad == angleRad) {
             return node(nearest);
         }
+        Inclination known = between.get(angleRad);
+        if (known != null) {
+            return known;
+        }
         Inclination near = node(nearest);
         Inclination other = node(nearest * stepRad < angleRad ? nearest + 1 : nearest - 1);
-        return between.computeIfAbsent(
-                angleRad,
-                angle -> path.at(near, other, angle)
-                        .or(() -> path.at(other, angle))
-                        .orElseThrow(() -> new IllegalStateException("no rest at " + Math.toDegrees(angle) + "°")));
+        Optional<Inclination> found = path.follow(near, other, angleRad).or(() -> path.follow(other, near, angleRad));
+        if (found.isEmpty()) {
+            endBefore(angleRad);
+            throw new LostRestException(angleRad);
+        }
+        between.put(angleRad, found.get());
+        return found.get();
+    }
+
+    private void endBefore(double angleRad) {
+        int kept = Math.max(0, (int) Math.floor(angleRad / stepRad) - first + 1);
+        nodes.subList(Math.min(kept, nodes.size()), nodes.size()).clear();
+        ended = true;
+    }
+
+    /** Something found on the curve; when the curve turns out to end earlier than its nodes told, found again on what is left of it. */
+    static <T> T settled(Supplier<T> search) {
+        while (true) {
+            try {
+                return search.get();
+            } catch (LostRestException e) {
+                // The curve is shorter now by a node at least, so this comes to an end.
+            }
+        }
     }
 
     private Inclination node(long place) {
@@ -306,6 +333,10 @@ public final class RightingArms {
 
     /** The curve with its figures. */
     RightingCurve curve(RightingCurve.Request request) {
+        return settled(() -> figures(request));
+    }
+
+    private RightingCurve figures(RightingCurve.Request request) {
         if (!exists()) {
             return empty(request);
         }

@@ -26,9 +26,9 @@ public record WindAnswer(double azimuth, String resistanceCentre, WindForce aflo
         HeelPath path = new HeelPath(Math.toRadians(request.azimuth()), request.freeTrim());
         WindForce afloat = new Wind(loaded.prepared().platform().windage()).on(held, path.leeward(held), speed);
         RightingArms arms = new RightingArms(loaded, request);
-        WindCurve curve = arms.exists()
+        WindCurve curve = RightingArms.settled(() -> arms.exists()
                 ? AxisAnswer.windCurve(new AxisStability(arms, loaded.prepared().platform()), speed)
-                : new WindCurve(speed, List.of(), null, null);
+                : new WindCurve(speed, List.of(), null, null));
         return new WindAnswer(request.azimuth(), RESISTANCE_CENTRE, afloat, curve);
     }
 }
