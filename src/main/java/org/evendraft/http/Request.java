@@ -3,6 +3,7 @@ package org.evendraft.http;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.TreeMap;
 
 /**
  * A request that has arrived whole.
@@ -37,6 +38,11 @@ record Request(
         variables = Map.copyOf(variables);
         query = Map.copyOf(query);
         headers = Map.copyOf(headers);
+    }
+
+    /** Its address with the parameters of the query, in the order of their names: what tells two questions apart. */
+    String target() {
+        return query.isEmpty() ? path : path + "?" + new TreeMap<>(query);
     }
 
     /** A variable of the address. */

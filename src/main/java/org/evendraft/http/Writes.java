@@ -37,7 +37,7 @@ final class Writes {
 
     private static Optional<IdempotentRequest> key(Request request) {
         return request.header(KEY)
-                .map(key -> IdempotentRequest.of(checked(key), request.method(), request.path(), request.body()));
+                .map(key -> IdempotentRequest.of(checked(key), request.method(), request.target(), request.body()));
     }
 
     private static String checked(String key) {

@@ -9,7 +9,7 @@ import java.util.HexFormat;
  *
  * @param key the sender's key, at most 255 characters
  * @param method the method, as {@code POST}
- * @param path the path
+ * @param path the path, with the parameters of its query if it has any
  * @param bodySha256 SHA-256 of the body, 64 hexadecimal digits
  */
 public record IdempotentRequest(String key, String method, String path, String bodySha256) {

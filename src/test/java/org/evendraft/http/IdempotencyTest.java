@@ -52,6 +52,18 @@ class IdempotencyTest {
     }
 
     @Test
+    void otherParametersUnderTheSameKeyAreRefusedAndTheSameInAnotherOrderAreNot() {
+        String righting = Barge.PATH + "/righting?to=2&step=1&azimuth=";
+        String first = api.post(righting + "0", Barge.CONDITION, KEY, "tablet-1")
+                .expect(200)
+                .text();
+        api.post(righting + "90", Barge.CONDITION, KEY, "tablet-1").expect(422);
+        Api.Reply retry = api.post(Barge.PATH + "/righting?azimuth=0&step=1&to=2", Barge.CONDITION, KEY, "tablet-1");
+        assertThat(retry.expect(200).text()).isEqualTo(first);
+        assertThat(retry.header("Idempotency-Replayed")).isEqualTo("true");
+    }
+
+    @Test
     void aRefusedRequestDoesNotUseItsKeyUp() {
         api.post(CONDITIONS, "{ \"mode\": \"submerged\" }", KEY, "tablet-1").expect(422);
         api.post(CONDITIONS, Barge.CONDITION, KEY, "tablet-1").expect(201);
