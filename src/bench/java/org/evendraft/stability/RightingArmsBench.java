@@ -35,11 +35,18 @@ public class RightingArmsBench {
 
     /** The arms alone. */
     @Benchmark
-    public List<List<RightingPoint>> arms() {
+    public List<double[]> arms() {
         return IntStream.range(0, AXES)
                 .parallel()
-                .mapToObj(i -> new RightingArms(loaded, RightingCurve.Request.usual(i * AZIMUTH_STEP)).points())
+                .mapToObj(i -> arms(i * AZIMUTH_STEP))
                 .toList();
+    }
+
+    private double[] arms(double azimuth) {
+        RightingArms arms = new RightingArms(loaded, RightingCurve.Request.usual(azimuth));
+        return IntStream.rangeClosed(1, (int) RightingCurve.Request.USUAL_ANGLE)
+                .mapToDouble(degrees -> arms.arm(arms.at(degrees * arms.stepRad())))
+                .toArray();
     }
 
     /** The curves with their figures: intercepts, greatest arm, area. */
