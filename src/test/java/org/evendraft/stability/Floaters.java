@@ -46,40 +46,31 @@ public final class Floaters {
 
     /** A platform of a hull, a lightship and tanks, nothing else. */
     public static PreparedPlatform platform(List<Body> hull, double mass, Vec3 centre, List<Tank> tanks) {
+        return platform(hull, new Lightship(mass, centre), tanks, List.of());
+    }
+
+    /** A platform of a hull and a lightship with one compartment that may flood, permeability 1. */
+    public static PreparedPlatform flooding(List<Body> hull, double mass, Vec3 centre, Body compartment) {
+        Compartment whole = new Compartment(compartment.name(), List.of(compartment), 1);
+        return platform(hull, new Lightship(mass, centre), List.of(), List.of(whole));
+    }
+
+    private static PreparedPlatform platform(
+            List<Body> hull, Lightship lightship, List<Tank> tanks, List<Compartment> compartments) {
         return new PreparedPlatform(new Platform(
                 "test",
                 "Test",
                 1.025,
                 hull,
                 List.of(),
-                new Lightship(mass, centre),
+                lightship,
                 tanks,
                 List.of(),
                 List.of(),
                 List.of(),
                 List.of(),
                 List.of(),
-                List.of(),
-                StabilityRules.NONE,
-                List.of()));
-    }
-
-    /** A platform of a hull and a lightship with one compartment that may flood, permeability 1. */
-    public static PreparedPlatform flooding(List<Body> hull, double mass, Vec3 centre, Body compartment) {
-        return new PreparedPlatform(new Platform(
-                "test",
-                "Test",
-                1.025,
-                hull,
-                List.of(),
-                new Lightship(mass, centre),
-                List.of(),
-                List.of(),
-                List.of(),
-                List.of(),
-                List.of(),
-                List.of(),
-                List.of(new Compartment(compartment.name(), List.of(compartment), 1)),
+                compartments,
                 StabilityRules.NONE,
                 List.of()));
     }
