@@ -3,12 +3,14 @@ package org.evendraft.stability;
 import static org.assertj.core.api.Assertions.assertThat;
 import static org.assertj.core.api.Assertions.within;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Objects;
 import net.jqwik.api.ForAll;
 import net.jqwik.api.Property;
 import net.jqwik.api.constraints.DoubleRange;
 import org.apache.commons.math3.analysis.integration.SimpsonIntegrator;
+import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.evendraft.geometry.Solid;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Body;
@@ -280,5 +282,59 @@ class RightingArmsTest {
         assertThat(points.get(0).area()).isZero();
         assertThat(points.get(20).area()).isCloseTo(to20, within(curve.areaTolerance()));
         assertThat(points.get(20).area() - points.get(10).area()).isCloseTo(from10, within(curve.areaTolerance()));
+    }
+
+    /** Boxes of 20 × 8 m at 5 m and of 12 × 15 m at 11 m, through deck immersion and bilge emergence to 80°: against {@link Section}. */
+    @ParameterizedTest
+    @CsvSource({"20, 8, 5, 4, 400", "12, 15, 11, 6, 100", "12, 15, 4, 5.5, 60"})
+    void boxHasTheArmsOfItsSectionAtAnyAngle(double breadth, double depth, double draft, double kg, double length) {
+        LoadedPlatform box = loaded(Floaters.bargeAt(length, breadth, depth, draft, kg));
+        RightingCurve curve = RightingArms.curve(box, fixed(0, 80));
+        assertThat(curve.points()).hasSize(81);
+        for (RightingPoint point : curve.points()) {
+            double arm = Section.arm(breadth, depth, draft, kg, Math.toRadians(point.angle()));
+            assertThat(point.gz()).as("at %s°", point.angle()).isCloseTo(arm, within(EXACT));
+        }
+    }
+
+    /** A rectangle heeled in the water: cut by a line, its area and centroid by the shoelace formula, the line's height by Brent's method. */
+    private static final class Section {
+        static double arm(double breadth, double depth, double draft, double kg, double phi) {
+            double b = breadth / 2;
+            double[][] corners = {{-b, 0}, {b, 0}, {b, depth}, {-b, depth}};
+            double reach = breadth + depth;
+            double height = new BrentSolver(1e-13)
+                    .solve(500, c -> moments(corners, phi, c)[0] - breadth * draft, -reach, reach);
+            double[] m = moments(corners, phi, height);
+            return -m[1] / m[0] * Math.cos(phi) - (kg - m[2] / m[0]) * Math.sin(phi);
+        }
+
+        /** Area and first moments by y and z of the part with y·sin φ + z·cos φ under a height. */
+        private static double[] moments(double[][] corners, double phi, double height) {
+            List<double[]> wet = new ArrayList<>();
+            for (int i = 0; i < corners.length; i++) {
+                double[] p = corners[i];
+                double[] q = corners[(i + 1) % corners.length];
+                double hp = p[0] * Math.sin(phi) + p[1] * Math.cos(phi) - height;
+                double hq = q[0] * Math.sin(phi) + q[1] * Math.cos(phi) - height;
+                if (hp <= 0) {
+                    wet.add(p);
+                }
+                if (hp * hq < 0) {
+                    double part = hp / (hp - hq);
+                    wet.add(new double[] {p[0] + part * (q[0] - p[0]), p[1] + part * (q[1] - p[1])});
+                }
+            }
+            double[] m = new double[3];
+            for (int i = 0; i < wet.size(); i++) {
+                double[] p = wet.get(i);
+                double[] q = wet.get((i + 1) % wet.size());
+                double twice = p[0] * q[1] - q[0] * p[1];
+                m[0] += twice / 2;
+                m[1] += twice * (p[0] + q[0]) / 6;
+                m[2] += twice * (p[1] + q[1]) / 6;
+            }
+            return m;
+        }
     }
 }
