@@ -33,7 +33,7 @@ public class RightingArmsBench {
         return LoadedPlatform.of(demo, BenchPlatforms.demoCondition(demo));
     }
 
-    /** The arms alone. */
+    /** The arms alone, each curve as far as it goes. */
     @Benchmark
     public List<double[]> arms() {
         return IntStream.range(0, AXES)
@@ -44,7 +44,8 @@ public class RightingArmsBench {
 
     private double[] arms(double azimuth) {
         RightingArms arms = new RightingArms(loaded, RightingCurve.Request.usual(azimuth));
-        return IntStream.rangeClosed(1, (int) RightingCurve.Request.USUAL_ANGLE)
+        int last = (int) Math.round(arms.endRad() / arms.stepRad());
+        return IntStream.rangeClosed(1, last)
                 .mapToDouble(degrees -> arms.arm(arms.at(degrees * arms.stepRad())))
                 .toArray();
     }
