@@ -27,6 +27,11 @@ record Console(PrintStream out, PrintStream err) {
         print(err, AnswerJson.pretty(problem));
     }
 
+    /** Prints a line for people beside the answer. */
+    void remark(String text) {
+        print(err, text);
+    }
+
     /** Prints a line of text. */
     void line(String text) {
         print(out, text);

@@ -26,7 +26,7 @@ public final class Program {
      * @param out where answers go
      * @param err where problems go
      * @param args the command with its options
-     * @return 0 when done, 1 after a bug, 2 after bad input, 3 when a target cannot be met
+     * @return 0 when done, 1 after a bug, 2 after bad input, 3 when a target cannot be met or criteria are not
      */
     public static int run(Launcher launcher, PrintStream out, PrintStream err, String... args) {
         Console console = new Console(out, err);
@@ -44,10 +44,15 @@ public final class Program {
                 .addSubcommand(new PlanCommand(launcher, console))
                 .addSubcommand(new HydrostaticsCommand(launcher, console))
                 .addSubcommand(new RightingCommand(launcher, console))
+                .addSubcommand(new WindCommand(launcher, console))
+                .addSubcommand(new CriteriaCommand(launcher, console))
+                .addSubcommand(new DamageCommand(launcher, console))
+                .addSubcommand(new AllowableKgCommand(launcher, console))
                 .addSubcommand(new MeshCommand(console))
                 .addSubcommand(new CommandLine.HelpCommand());
         line.getCommandSpec().version("evendraft " + launcher.version());
         line.getSubcommands().values().forEach(sub -> sub.setUsageHelpAutoWidth(true));
+        line.setCaseInsensitiveEnumValuesAllowed(true);
         return line.setUsageHelpAutoWidth(true).setOut(new PrintWriter(console.out(), true, StandardCharsets.UTF_8));
     }
 

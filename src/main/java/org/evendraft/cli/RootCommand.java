@@ -20,7 +20,8 @@ import picocli.CommandLine.Spec;
         synopsisSubcommandLabel = "COMMAND",
         footer = {
             "",
-            "Exit status: 0 done, 2 bad input (a problem in JSON on standard error), 3 the target cannot be met.",
+            "Exit status: 0 done, 2 bad input (a problem in JSON on standard error), 3 the target cannot be met, or a",
+            "criterion is not.",
             "A planning aid only: approved stability documents, class and flag rules and local codes govern."
         })
 final class RootCommand implements Runnable {

@@ -4,25 +4,20 @@ import java.util.OptionalDouble;
 import org.evendraft.platform.Faults;
 import org.evendraft.stability.KgRequestReader;
 import org.jspecify.annotations.Nullable;
+import picocli.CommandLine.Option;
 
-/** A wind speed given on the command line. */
+/** A wind speed given on the command line, common to several commands. */
 final class WindOption {
-    private WindOption() {}
+    @Option(
+            names = "--wind",
+            paramLabel = "V",
+            description = "Wind speed (m/s) in place of that of the condition's mode.")
+    private @Nullable Double speed;
 
-    /**
-     * The speed (m/s), if one is given.
-     *
-     * @throws org.evendraft.platform.FaultyDocumentException when it is out of range
-     */
-    static OptionalDouble speed(@Nullable Double given) {
-        if (given == null) {
-            return OptionalDouble.empty();
-        }
-        if (!KgRequestReader.WIND.allows(given)) {
-            Faults faults = new Faults();
-            faults.meaning("", "wind must be " + KgRequestReader.WIND.words() + " m/s, not " + given);
-            faults.throwIfAny();
-        }
-        return OptionalDouble.of(given);
+    /** The speed (m/s), if one is given; the faults are told when it is out of range. */
+    OptionalDouble speed(Faults faults) {
+        OptionalDouble given = speed == null ? OptionalDouble.empty() : OptionalDouble.of(speed);
+        KgRequestReader.checkWind(given, faults);
+        return given;
     }
 }

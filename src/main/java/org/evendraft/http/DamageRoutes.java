@@ -1,13 +1,12 @@
 package org.evendraft.http;
 
-import com.fasterxml.jackson.databind.JsonNode;
-import com.fasterxml.jackson.databind.node.ArrayNode;
-import com.fasterxml.jackson.databind.node.MissingNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.stream.Stream;
 import org.evendraft.platform.Json;
+import org.evendraft.platform.Situation;
 import org.evendraft.service.ControlRoom;
 import org.evendraft.service.JudgeDamage;
 import org.evendraft.service.JudgeDamage.Asked;
@@ -58,32 +57,18 @@ final class DamageRoutes {
     private static Asked asked(Request request) {
         Query query = new Query(request.query());
         OptionalDouble wind = StabilityQuery.wind(query);
-        String[] words = Stream.of(Cases.values()).map(Json::code).toArray(String[]::new);
-        String cases = StabilityQuery.oneOf(query, "cases", words[0], words);
-        JsonNode own = own(query);
-        if (!own.isMissingNode() && query.hasAny("cases")) {
+        Cases cases = query.choice("cases", EnumSet.allOf(Cases.class), Cases.LISTED);
+        Situation situation =
+                query.choice("situation", EnumSet.of(Situation.COLLISION, Situation.FLOODING), Situation.COLLISION);
+        Optional<String> flooded = query.text("flooded");
+        if (flooded.isPresent() && query.hasAny("cases")) {
             query.fault("cases", "cannot be given together with flooded");
         }
-        query.done();
-        Cases chosen = Stream.of(Cases.values())
-                .filter(c -> Json.code(c).equals(cases))
-                .findFirst()
-                .orElse(Cases.LISTED);
-        return new Asked(chosen, own, wind);
-    }
-
-    /** One case of its own: spaces named in the query, by commas. */
-    private static JsonNode own(Query query) {
-        String situation = StabilityQuery.oneOf(query, "situation", "collision", "collision", "flooding");
-        if (!query.hasAny("flooded")) {
-            if (query.hasAny("situation")) {
-                query.fault("situation", "goes with flooded");
-            }
-            return MissingNode.getInstance();
+        if (flooded.isEmpty() && query.hasAny("situation")) {
+            query.fault("situation", "goes with flooded");
         }
-        ObjectNode own = Json.mapper().createObjectNode().put("id", "asked").put("situation", situation);
-        ArrayNode flooded = own.putArray("flooded");
-        query.text("flooded").ifPresent(list -> Stream.of(list.split(",", -1)).forEach(flooded::add));
-        return own;
+        query.done();
+        return flooded.map(spaces -> Asked.flooded(List.of(spaces.split(",", -1)), situation, wind))
+                .orElseGet(() -> Asked.cases(cases, wind));
     }
 }

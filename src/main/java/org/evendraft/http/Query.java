@@ -10,8 +10,10 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
+import java.util.stream.Collectors;
 import org.evendraft.platform.Faults;
 import org.evendraft.platform.FaultyDocumentException;
+import org.evendraft.platform.Json;
 import org.evendraft.service.Parameters;
 import org.evendraft.store.PageRequest;
 
@@ -97,6 +99,21 @@ final class Query implements Parameters {
         }
     }
 
+    /** A constant by its code, with a default. */
+    <E extends Enum<E>> E choice(String name, Set<E> allowed, E otherwise) {
+        Optional<String> text = text(name);
+        if (text.isEmpty()) {
+            return otherwise;
+        }
+        Optional<E> found =
+                allowed.stream().filter(e -> Json.code(e).equals(text.get())).findFirst();
+        if (found.isEmpty()) {
+            String codes = allowed.stream().map(Json::code).collect(Collectors.joining(", "));
+            fault(name, "must be one of " + codes + ", not '" + text.get() + "'");
+        }
+        return found.orElse(otherwise);
+    }
+
     /** Which part of a list is wanted. */
     PageRequest page() {
         int limit = whole("limit", 1, LONGEST_PAGE).orElse(USUAL_PAGE);
@@ -107,6 +124,11 @@ final class Query implements Parameters {
     /** Whether any of these parameters is given. */
     boolean hasAny(String... names) {
         return Set.of(names).stream().anyMatch(given::containsKey);
+    }
+
+    /** Where what is wrong is gathered. */
+    Faults faults() {
+        return faults;
     }
 
     /** Whether nothing has been found wrong so far. */

@@ -7,7 +7,6 @@ import org.evendraft.service.ComputeRighting;
 import org.evendraft.service.ControlRoom;
 import org.evendraft.service.JudgeStability;
 import org.evendraft.service.Reply;
-import org.evendraft.stability.RightingCurve;
 
 /** Curves of righting arms, the wind, and the criteria of the intact platform. */
 final class RightingRoutes {
@@ -32,57 +31,52 @@ final class RightingRoutes {
     }
 
     private Answer rightingOfDocument(Request request) {
-        Query query = new Query(request.query());
-        OptionalDouble wind = StabilityQuery.wind(query);
-        RightingCurve.Request wanted = StabilityQuery.curve(query, query.required("azimuth"));
+        StabilityQuery asked = StabilityQuery.aboutOneAxis(new Query(request.query()));
+        String platform = request.variable("platform");
         return writes.read(
                 request,
-                () -> Reply.ok(compute.curve(request.variable("platform"), Json.parse(request.body()), wind, wanted)));
+                () -> Reply.ok(compute.curve(platform, Json.parse(request.body()), asked.wind(), asked.curve())));
     }
 
     private Answer rightingOfStored(Request request) {
         Query query = new Query(request.query());
-        boolean one = query.hasAny("azimuth");
-        OptionalDouble wind = StabilityQuery.wind(query);
-        RightingCurve.Request wanted =
-                StabilityQuery.curve(query, query.number("azimuth").orElse(0));
+        StabilityQuery asked = StabilityQuery.aboutAnyAxis(query);
         String platform = request.variable("platform");
         String condition = request.variable("condition");
         return Answer.ok(
-                one
-                        ? compute.ofStored(platform, condition, wind, wanted)
-                        : compute.allAround(platform, condition, wind, wanted));
+                query.hasAny("azimuth")
+                        ? compute.ofStored(platform, condition, asked.wind(), asked.curve())
+                        : compute.allAround(platform, condition, asked.wind(), asked.curve()));
     }
 
     private Answer windOnDocument(Request request) {
-        Query query = new Query(request.query());
-        OptionalDouble wind = StabilityQuery.wind(query);
-        RightingCurve.Request wanted = StabilityQuery.curve(query, query.required("azimuth"));
+        StabilityQuery asked = StabilityQuery.aboutOneAxis(new Query(request.query()));
+        String platform = request.variable("platform");
         return writes.read(
-                request,
-                () -> Reply.ok(judge.wind(request.variable("platform"), Json.parse(request.body()), wind, wanted)));
+                request, () -> Reply.ok(judge.wind(platform, Json.parse(request.body()), asked.wind(), asked.curve())));
     }
 
     private Answer windOnStored(Request request) {
-        Query query = new Query(request.query());
-        OptionalDouble wind = StabilityQuery.wind(query);
-        RightingCurve.Request wanted = StabilityQuery.curve(query, query.required("azimuth"));
-        return Answer.ok(judge.windOnStored(request.variable("platform"), request.variable("condition"), wind, wanted));
+        StabilityQuery asked = StabilityQuery.aboutOneAxis(new Query(request.query()));
+        return Answer.ok(judge.windOnStored(
+                request.variable("platform"), request.variable("condition"), asked.wind(), asked.curve()));
     }
 
     private Answer criteriaOfDocument(Request request) {
-        Query query = new Query(request.query());
-        OptionalDouble wind = StabilityQuery.wind(query);
-        query.done();
-        return writes.read(
-                request,
-                () -> Reply.ok(judge.criteria(request.variable("platform"), Json.parse(request.body()), wind)));
+        OptionalDouble wind = windAlone(request);
+        String platform = request.variable("platform");
+        return writes.read(request, () -> Reply.ok(judge.criteria(platform, Json.parse(request.body()), wind)));
     }
 
     private Answer criteriaOfStored(Request request) {
+        OptionalDouble wind = windAlone(request);
+        return Answer.ok(judge.criteriaOfStored(request.variable("platform"), request.variable("condition"), wind));
+    }
+
+    private static OptionalDouble windAlone(Request request) {
         Query query = new Query(request.query());
         OptionalDouble wind = StabilityQuery.wind(query);
         query.done();
-        return Answer.ok(judge.criteriaOfStored(request.variable("platform"), request.variable("condition"), wind));
+        return wind;
     }
 }

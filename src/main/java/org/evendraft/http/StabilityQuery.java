@@ -1,54 +1,53 @@
 package org.evendraft.http;
 
-import java.util.List;
+import java.util.EnumSet;
 import java.util.OptionalDouble;
-import java.util.stream.Stream;
-import org.evendraft.platform.Json;
 import org.evendraft.stability.KgRequestReader;
 import org.evendraft.stability.LiquidTreatment;
 import org.evendraft.stability.RightingCurve;
 
-/** Reads the parameters that questions about stability have in common. */
-final class StabilityQuery {
-    private StabilityQuery() {}
+/**
+ * What a question about stability asks by its parameters.
+ *
+ * @param wind wind speed in place of the mode's (m/s)
+ * @param curve the curve about an axis
+ */
+record StabilityQuery(OptionalDouble wind, RightingCurve.Request curve) {
 
-    /** A wind speed in place of the mode's (m/s). */
-    static OptionalDouble wind(Query query) {
-        OptionalDouble wind = query.number("wind");
-        if (wind.isPresent() && !KgRequestReader.WIND.allows(wind.getAsDouble())) {
-            query.fault("wind", "must be " + KgRequestReader.WIND.words() + " m/s, not " + wind.getAsDouble());
-        }
-        return wind;
+    /** What becomes of the trim about the axis perpendicular to that of a curve. */
+    private enum Trim {
+        /** At rest at each angle. */
+        FREE,
+        /** Held at 0. */
+        FIXED
     }
 
-    /**
-     * The curve wanted. Ends the reading of the query.
-     *
-     * @param azimuth direction of the axis (degrees)
-     */
-    static RightingCurve.Request curve(Query query, double azimuth) {
+    /** A question about the axis that must be given. */
+    static StabilityQuery aboutOneAxis(Query query) {
+        return read(query, query.required("azimuth"));
+    }
+
+    /** A question about the axis that is given; about the first of those all around when none is. */
+    static StabilityQuery aboutAnyAxis(Query query) {
+        return read(query, query.number("azimuth").orElse(0));
+    }
+
+    private static StabilityQuery read(Query query, double azimuth) {
         double to = query.number("to").orElse(RightingCurve.Request.USUAL_ANGLE);
         double step = query.number("step").orElse(1);
-        boolean freeTrim = oneOf(query, "trim", "free", "free", "fixed").equals("free");
-        String treatment = oneOf(query, "liquids", "free", codes());
-        LiquidTreatment liquids = Stream.of(LiquidTreatment.values())
-                .filter(way -> Json.code(way).equals(treatment))
-                .findFirst()
-                .orElse(LiquidTreatment.FREE);
+        Trim trim = query.choice("trim", EnumSet.allOf(Trim.class), Trim.FREE);
+        LiquidTreatment liquids = query.choice("liquids", EnumSet.allOf(LiquidTreatment.class), LiquidTreatment.FREE);
+        OptionalDouble wind = wind(query);
+        RightingCurve.Request curve =
+                RightingCurve.Request.checked(azimuth, to, step, trim == Trim.FREE, liquids, query.faults());
         query.done();
-        return RightingCurve.Request.checked(azimuth, to, step, freeTrim, liquids);
+        return new StabilityQuery(wind, curve);
     }
 
-    private static String[] codes() {
-        return Stream.of(LiquidTreatment.values()).map(Json::code).toArray(String[]::new);
-    }
-
-    /** One of some words. */
-    static String oneOf(Query query, String name, String otherwise, String... words) {
-        String given = query.text(name).orElse(otherwise);
-        if (!List.of(words).contains(given)) {
-            query.fault(name, "must be one of " + String.join(", ", words));
-        }
-        return given;
+    /** A wind speed in place of the mode's (m/s); others may follow. */
+    static OptionalDouble wind(Query query) {
+        OptionalDouble wind = query.number("wind");
+        KgRequestReader.checkWind(wind, query.faults());
+        return wind;
     }
 }

@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
+import java.util.regex.Pattern;
 import org.evendraft.platform.DamageCase;
 import org.evendraft.platform.Fault;
 import org.evendraft.platform.Faults;
@@ -34,6 +35,7 @@ import org.jspecify.annotations.Nullable;
 /** Computes curves of the greatest KG as jobs, and stores such a curve as that of a mode. */
 public final class ComputeAllowableKg {
     private static final String KIND = "allowableKg";
+    private static final Pattern CURVE = Pattern.compile("^/modes/\\d+/allowableKg");
 
     private final PlatformShelf shelf;
     private final StorePlatform storePlatform;
@@ -151,7 +153,18 @@ public final class ComputeAllowableKg {
         JsonNode changed = KgCurves.replaced(Json.parse(text), mode, points);
         // The rest of the document is that of the revision read, so that must still be the current one.
         OptionalInt basis = expected.isPresent() ? expected : OptionalInt.of(stored.revision());
-        return storePlatform.prepare(platform, AnswerJson.text(changed), changed, basis);
+        try {
+            return storePlatform.prepare(platform, AnswerJson.text(changed), changed, basis);
+        } catch (FaultyDocumentException e) {
+            throw inRequest(e, request.has("job") ? "/job" : "/points");
+        }
+    }
+
+    /** What is wrong with the platform's document is wrong with the curve, for the rest of it was stored as it is. */
+    private static FaultyDocumentException inRequest(FaultyDocumentException inDocument, String curve) {
+        return new FaultyDocumentException(inDocument.faults().stream()
+                .map(f -> new Fault(CURVE.matcher(f.pointer()).replaceFirst(curve), f.detail(), f.kind()))
+                .toList());
     }
 
     private static void requireMode(PlatformAtRevision platform, String mode) {
@@ -172,6 +185,9 @@ public final class ComputeAllowableKg {
                 .map(row -> new KgPoint(row[0], row[1]))
                 .toList();
         fields.noOthers();
+        if (fields.has("points") && points.isEmpty() && faults.count() == 0) {
+            fields.form("points", "points must have at least one entry");
+        }
         faults.throwIfAny();
         return byJob ? ofJob(platform, mode, job) : points;
     }

@@ -2,6 +2,8 @@ package org.evendraft.service;
 
 import com.fasterxml.jackson.annotation.JsonUnwrapped;
 import com.fasterxml.jackson.databind.JsonNode;
+import com.fasterxml.jackson.databind.node.MissingNode;
+import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.util.Collections;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -9,9 +11,11 @@ import org.evendraft.platform.Condition;
 import org.evendraft.platform.DamageCase;
 import org.evendraft.platform.DamageCaseReader;
 import org.evendraft.platform.FaultyDocumentException;
+import org.evendraft.platform.Json;
 import org.evendraft.platform.Mode;
 import org.evendraft.platform.Platform;
 import org.evendraft.platform.PreparedPlatform;
+import org.evendraft.platform.Situation;
 import org.evendraft.service.Loadings.Loading;
 import org.evendraft.stability.DamageSurvey;
 import org.evendraft.stability.DamageSurvey.Question;
@@ -50,7 +54,25 @@ public final class JudgeDamage {
      * @param own one case in their place, as the platform's document would list it; a missing node for none
      * @param windSpeed wind speed for criteria that give none of their own, in place of the mode's (m/s)
      */
-    public record Asked(Cases cases, JsonNode own, OptionalDouble windSpeed) {}
+    public record Asked(Cases cases, JsonNode own, OptionalDouble windSpeed) {
+
+        /** Cases of a kind. */
+        public static Asked cases(Cases cases, OptionalDouble windSpeed) {
+            return new Asked(cases, MissingNode.getInstance(), windSpeed);
+        }
+
+        /**
+         * One case of its own.
+         *
+         * @param flooded ids of the spaces open to the sea, as yet unchecked
+         */
+        public static Asked flooded(List<String> flooded, Situation situation, OptionalDouble windSpeed) {
+            ObjectNode own = Json.mapper().createObjectNode();
+            own.put("id", "asked").put("situation", Json.code(situation));
+            flooded.forEach(own.putArray("flooded")::add);
+            return new Asked(Cases.LISTED, own, windSpeed);
+        }
+    }
 
     /**
      * Damage cases judged and where the figures come from, on one level of JSON.
@@ -97,10 +119,18 @@ public final class JudgeDamage {
                 progress -> survey(loading, asked, progress, source));
     }
 
-    /** Judges a platform that need not be stored. */
+    /**
+     * Judges a platform that need not be stored.
+     *
+     * @param progress is told of the work
+     */
     public static TracedSurvey survey(
-            PlatformAtRevision platform, Condition condition, Asked asked, Provenance.Source source) {
-        return survey(Loading.of(platform, condition), asked, Progress.UNWATCHED, source);
+            PlatformAtRevision platform,
+            Condition condition,
+            Asked asked,
+            Progress progress,
+            Provenance.Source source) {
+        return survey(Loading.of(platform, condition), asked, progress, source);
     }
 
     private static TracedSurvey survey(Loading loading, Asked asked, Progress progress, Provenance.Source source) {

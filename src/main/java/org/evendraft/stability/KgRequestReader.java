@@ -16,7 +16,7 @@ import org.evendraft.platform.Range;
 /** Reads what limits of KG are wanted. */
 public final class KgRequestReader {
     /** Winds beyond this are none that blow (m/s). */
-    public static final Range WIND = new Range(0, false, 150);
+    private static final Range WIND = new Range(0, false, 150);
 
     private static final int MOST_DRAFTS = 200;
     /** Drafts over a mode's range when none are given. */
@@ -65,6 +65,13 @@ public final class KgRequestReader {
         }
         faults.throwIfAny();
         return new Wanted(new KgRequest(mode.orElseThrow(), drafts, wind, water, List.of()), damage);
+    }
+
+    /** Checks a wind speed that was not given in a document (m/s). */
+    public static void checkWind(OptionalDouble wind, Faults faults) {
+        if (wind.isPresent() && !WIND.allows(wind.getAsDouble())) {
+            faults.meaning("", "wind must be " + WIND.words() + " m/s, not " + wind.getAsDouble());
+        }
     }
 
     private static Optional<Mode> mode(Fields fields, PreparedPlatform prepared) {

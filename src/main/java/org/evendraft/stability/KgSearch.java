@@ -104,7 +104,7 @@ final class KgSearch {
         for (CriterionResult gm : IntactStability.metacentric(rules, mode, evenKeel.gm())) {
             if (gm.margin() != null && lowest + gm.margin() < limit) {
                 limit = lowest + gm.margin();
-                breaksAt = limit;
+                breaksAt = limit + TOLERANCE / 2;
                 governing = new Governing(gm.criterion(), gm.clause(), null, gm.azimuth());
             }
         }
@@ -112,6 +112,9 @@ final class KgSearch {
             limit = lowest + evenKeel.gm().least().corrected();
             breaksAt = limit;
             governing = new Governing("positiveGm", "a platform of no GM does not float upright", null, null);
+        }
+        if (limit < lowest) {
+            limit = Double.NEGATIVE_INFINITY;
         }
     }
 

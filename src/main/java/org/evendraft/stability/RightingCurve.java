@@ -2,7 +2,6 @@ package org.evendraft.stability;
 
 import java.util.List;
 import org.evendraft.platform.Faults;
-import org.evendraft.platform.FaultyDocumentException;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -65,11 +64,10 @@ public record RightingCurve(
         /**
          * A request with its angles checked.
          *
-         * @throws FaultyDocumentException with all that is out of range
+         * @param faults is told of all that is out of range; the request must not be used then
          */
         public static Request checked(
-                double azimuth, double to, double step, boolean freeTrim, LiquidTreatment liquids) {
-            Faults faults = new Faults();
+                double azimuth, double to, double step, boolean freeTrim, LiquidTreatment liquids, Faults faults) {
             if (!(Math.abs(azimuth) <= 360)) {
                 faults.meaning("", "azimuth must lie within 360°, not " + azimuth);
             }
@@ -80,7 +78,6 @@ public record RightingCurve(
                 faults.meaning(
                         "", "step must be at least " + LEAST_STEP + "° and at most the greatest angle, not " + step);
             }
-            faults.throwIfAny();
             return new Request(azimuth, to, step, freeTrim, liquids);
         }
 
