@@ -54,6 +54,7 @@ public final class KgRequestReader {
         Optional<Mode> mode = mode(fields, prepared);
         Range depth = new Range(prepared.hull().lowest(), true, prepared.hull().highest());
         List<Double> drafts = drafts(fields, depth, mode);
+        drafts.forEach(draft -> checkAfloat(fields, prepared, draft));
         OptionalDouble wind = fields.optionalNumber("windSpeed", WIND);
         double water =
                 fields.number("waterDensity", Range.DENSITY, prepared.platform().waterDensity());
@@ -104,6 +105,13 @@ public final class KgRequestReader {
             }
         }
         return drafts;
+    }
+
+    /** A draft at which the hull lies in the water, and not all of it: the top of the hull itself is none. */
+    private static void checkAfloat(Fields fields, PreparedPlatform prepared, double draft) {
+        if (!LoadedPlatform.upright(prepared, 1, draft, 0).canFloat()) {
+            fields.meaning("drafts", "at a draft of " + draft + " m the hull has no reserve of buoyancy left");
+        }
     }
 
     private static List<Double> usualDrafts(Fields fields, Range depth, Optional<Mode> mode) {

@@ -153,6 +153,11 @@ class AllowableKgTest {
                         .expect(400)
                         .pointers())
                 .containsExactly("/drafts/by");
+        // 10 m is the deck of the barge: no hull is left over the water
+        assertThat(api.post(COMPUTE, many("[9.99, 10]")).expect(422).details())
+                .singleElement()
+                .asString()
+                .contains("no reserve");
         assertThat(api.post(COMPUTE, many("[]")).expect(400).pointers()).containsExactly("/drafts");
         assertThat(api.post(COMPUTE, "{}").expect(400).pointers()).contains("/mode");
         api.post("/api/v1/platforms/nobody/allowable-kg", REQUEST).expect(404);
