@@ -30,7 +30,13 @@ public final class ConditionReader {
         return condition;
     }
 
-    private static Optional<Mode> mode(Fields fields, List<Mode> modes) {
+    /**
+     * Reads the id of a mode, where one is given.
+     *
+     * @param fields what may give it, under its usual name
+     * @param modes the platform's modes
+     */
+    public static Optional<Mode> mode(Fields fields, List<Mode> modes) {
         Optional<String> id = fields.optionalText("mode");
         Optional<Mode> mode = id.flatMap(
                 wanted -> modes.stream().filter(m -> m.id().equals(wanted)).findFirst());

@@ -7,7 +7,7 @@ import java.util.Optional;
 import java.util.Set;
 
 /** Reads loads. */
-final class LoadReader {
+public final class LoadReader {
     private final Set<String> areas = new LinkedHashSet<>();
 
     private LoadReader(List<DeckArea> areas) {
@@ -22,6 +22,26 @@ final class LoadReader {
             loads.add(reader.load(fields, loads.size() + 1));
         }
         return loads;
+    }
+
+    /**
+     * Reads one load, with the same faults as in a condition.
+     *
+     * @param fields the load
+     * @param areas the platform's deck areas
+     */
+    public static Load one(Fields fields, List<DeckArea> areas) {
+        return new LoadReader(areas).load(fields, 1);
+    }
+
+    /**
+     * Reads the id of a deck area, where one is given.
+     *
+     * @param fields what may give it, under its usual name
+     * @param areas the platform's deck areas
+     */
+    public static Optional<String> area(Fields fields, List<DeckArea> areas) {
+        return new LoadReader(areas).area(fields);
     }
 
     private Load load(Fields fields, int number) {

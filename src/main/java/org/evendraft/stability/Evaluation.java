@@ -57,6 +57,16 @@ public final class Evaluation {
         throw FaultyDocumentException.impossible("", reason(found));
     }
 
+    /**
+     * Every limit in force, judged where the platform lies at a waterplane that need not be its own rest, as under a wind.
+     *
+     * @param loaded the platform in the condition, which can float
+     * @param at where it lies
+     */
+    public static List<LimitResult> limits(LoadedPlatform loaded, Condition condition, Waterplane at) {
+        return Limits.judge(loaded.prepared(), condition, loaded, loaded.evenKeel(), at);
+    }
+
     /** Why a platform does not float, in a sentence. */
     static String reason(Equilibrium found) {
         if (found instanceof Equilibrium.Sinks sinks && sinks.mass() <= 0) {
