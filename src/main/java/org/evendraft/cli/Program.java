@@ -42,6 +42,7 @@ public final class Program {
                 .addSubcommand(new ServeCommand(launcher, console))
                 .addSubcommand(new EvaluateCommand(launcher, console))
                 .addSubcommand(new PlanCommand(launcher, console))
+                .addSubcommand(new LoadPlanCommand(launcher, console))
                 .addSubcommand(new HydrostaticsCommand(launcher, console))
                 .addSubcommand(new RightingCommand(launcher, console))
                 .addSubcommand(new WindCommand(launcher, console))

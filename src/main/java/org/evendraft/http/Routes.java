@@ -22,6 +22,7 @@ final class Routes {
                         new DamageRoutes(room, writes).routes(),
                         new KgRoutes(room, writes).routes(),
                         new PlanRoutes(room, writes).routes(),
+                        new LoadPlanRoutes(room, writes).routes(),
                         new JobRoutes(room).routes())
                 .flatMap(List::stream)
                 .toList();

@@ -5,6 +5,7 @@ import java.util.function.Supplier;
 import org.evendraft.store.ConditionRepository;
 import org.evendraft.store.Database;
 import org.evendraft.store.IdempotencyRepository;
+import org.evendraft.store.LoadPlanRepository;
 import org.evendraft.store.PlanRepository;
 import org.evendraft.store.PlatformRepository;
 import org.evendraft.store.SoundingRepository;
@@ -24,6 +25,8 @@ public final class ControlRoom {
     private final TankTableFile tankTableFile;
     private final MakePlan makePlan;
     private final ReadPlans readPlans;
+    private final MakeLoadPlan makeLoadPlan;
+    private final ReadLoadPlans readLoadPlans;
     private final ComputeRighting computeRighting;
     private final Jobs jobs;
     private final JudgeStability judgeStability;
@@ -50,13 +53,17 @@ public final class ControlRoom {
         this.recordSoundings = new RecordSoundings(shelf, soundings, clock);
         this.readSoundings = new ReadSoundings(database, shelf, soundings);
         this.readTankStates = new ReadTankStates(database, shelf, soundings, clock);
-        this.evaluateCondition = new EvaluateCondition(shelf, new LatestFills(readTankStates), source);
+        LatestFills latestFills = new LatestFills(readTankStates);
+        this.evaluateCondition = new EvaluateCondition(shelf, latestFills, source);
         this.storeCondition = new StoreCondition(evaluateCondition, conditions);
         this.readConditions = new ReadConditions(database, shelf, conditions);
         this.tankTableFile = new TankTableFile(shelf, storePlatform);
         PlanRepository plans = new PlanRepository(clock, ids);
         this.makePlan = new MakePlan(shelf, readConditions, plans, source);
         this.readPlans = new ReadPlans(database, readConditions, plans);
+        LoadPlanRepository loadPlans = new LoadPlanRepository(clock, ids);
+        this.readLoadPlans = new ReadLoadPlans(database, shelf, loadPlans);
+        this.makeLoadPlan = new MakeLoadPlan(shelf, readConditions, readLoadPlans, latestFills, loadPlans, source);
         this.jobs = new Jobs(database, clock, ids);
         Loadings loadings = new Loadings(shelf, evaluateCondition, readConditions);
         this.computeRighting = new ComputeRighting(loadings, source);
@@ -129,6 +136,16 @@ public final class ControlRoom {
     /** Reads plans. */
     public ReadPlans readPlans() {
         return readPlans;
+    }
+
+    /** Makes load plans. */
+    public MakeLoadPlan makeLoadPlan() {
+        return makeLoadPlan;
+    }
+
+    /** Reads load plans. */
+    public ReadLoadPlans readLoadPlans() {
+        return readLoadPlans;
     }
 
     /** Computes righting arms. */

@@ -28,6 +28,15 @@ final class LatestFills {
 
     /** The document with the readings, or as it is when it does not ask for them. */
     Filled fill(PlatformAtRevision platform, JsonNode document) {
+        return fill(platform, document, "taken as empty");
+    }
+
+    /**
+     * The document with the readings, or as it is when it does not ask for them.
+     *
+     * @param otherwise what becomes of tanks without a reading, in words
+     */
+    Filled fill(PlatformAtRevision platform, JsonNode document, String otherwise) {
         if (!LATEST.equals(document.path(FILLS).textValue())) {
             return new Filled(document, List.of());
         }
@@ -47,13 +56,13 @@ final class LatestFills {
                 old.add(status.tank());
             }
         }
-        return new Filled(filled, warnings(missing, old));
+        return new Filled(filled, warnings(missing, old, otherwise));
     }
 
-    private static List<String> warnings(List<String> missing, List<String> old) {
+    private static List<String> warnings(List<String> missing, List<String> old, String otherwise) {
         List<String> warnings = new ArrayList<>();
         if (!missing.isEmpty()) {
-            warnings.add("No reading of " + tanks(missing) + ": taken as empty.");
+            warnings.add("No reading of " + tanks(missing) + ": " + otherwise + ".");
         }
         if (!old.isEmpty()) {
             warnings.add("The latest reading of " + tanks(old) + " is more than " + TankStatus.OLD.toHours()

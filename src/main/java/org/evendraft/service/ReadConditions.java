@@ -4,6 +4,7 @@ import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.time.Instant;
 import java.util.List;
+import java.util.Optional;
 import java.util.OptionalInt;
 import org.evendraft.platform.Json;
 import org.evendraft.store.ConditionRepository;
@@ -80,8 +81,12 @@ public final class ReadConditions {
     }
 
     StoredCondition stored(String platform, String id) {
-        return database.read(handle -> conditions.find(handle, platform, id))
+        return find(platform, id)
                 .orElseThrow(() -> Refusal.notFound("Platform " + platform + " has no condition " + id + "."));
+    }
+
+    Optional<StoredCondition> find(String platform, String id) {
+        return database.read(handle -> conditions.find(handle, platform, id));
     }
 
     /**

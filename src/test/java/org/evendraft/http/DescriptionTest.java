@@ -68,6 +68,8 @@ class DescriptionTest {
                 .isEmpty();
         assertThat(DESCRIPTION.deviations("PlanRequest", resource("/db/demo/request.json")))
                 .isEmpty();
+        assertThat(DESCRIPTION.deviations("LoadPlanRequest", resource("/db/demo/load-plan.json")))
+                .isEmpty();
     }
 
     private static String resource(String name) throws IOException {

@@ -16,6 +16,7 @@ abstract class RepositoryContract
                 SoundingContract,
                 ConditionContract,
                 PlanContract,
+                LoadPlanContract,
                 IdempotencyContract,
                 JobContract {
     private final TimeZone usualZone = TimeZone.getDefault();
@@ -43,6 +44,6 @@ abstract class RepositoryContract
 
     @Test
     void healthTellsTheLastMigration() {
-        assertThat(database().health()).isEqualTo(new Health(true, Optional.of("6")));
+        assertThat(database().health()).isEqualTo(new Health(true, Optional.of("7")));
     }
 }
