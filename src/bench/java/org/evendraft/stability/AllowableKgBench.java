@@ -50,7 +50,7 @@ public class AllowableKgBench {
                 .mapToObj(i -> range.least() + i * step)
                 .toList();
         KgRequest request = new KgRequest(
-                operating, drafts, OptionalDouble.empty(), demo.platform().waterDensity(), damage);
+                operating, drafts, OptionalDouble.empty(), demo.platform().waterDensity(), OptionalDouble.empty(), damage);
         return AllowableKgCurve.find(demo, request, Progress.UNWATCHED);
     }
 

@@ -43,7 +43,7 @@ public class RightingArmsBench {
     }
 
     private double[] arms(double azimuth) {
-        RightingArms arms = new RightingArms(loaded, RightingCurve.Request.usual(azimuth));
+        RightingArms arms = RightingArms.fromUpright(loaded, RightingCurve.Request.usual(azimuth));
         int last = (int) Math.round(arms.endRad() / arms.stepRad());
         return IntStream.rangeClosed(1, last)
                 .mapToDouble(degrees -> arms.arm(arms.at(degrees * arms.stepRad())))

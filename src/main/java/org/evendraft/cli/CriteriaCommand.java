@@ -42,6 +42,6 @@ final class CriteriaCommand implements Callable<Integer> {
         Provenance.Source source = new Provenance.Source(Clock.systemUTC(), launcher.version());
         TracedCriteria judged = JudgeStability.criteria(loading.platform(), loading.condition(), speed, source);
         console.answer(judged);
-        return judged.answer().met() ? Console.DONE : Console.CANNOT_BE_MET;
+        return Boolean.FALSE.equals(judged.answer().met()) ? Console.CANNOT_BE_MET : Console.DONE;
     }
 }

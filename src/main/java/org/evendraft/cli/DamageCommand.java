@@ -73,7 +73,7 @@ final class DamageCommand implements Callable<Integer> {
         TracedSurvey judged =
                 JudgeDamage.survey(loading.platform(), loading.condition(), asked, progress.to(console), source);
         console.answer(judged);
-        return judged.survey().survived() ? Console.DONE : Console.CANNOT_BE_MET;
+        return Boolean.FALSE.equals(judged.survey().survived()) ? Console.CANNOT_BE_MET : Console.DONE;
     }
 
     private Asked asked(OptionalDouble speed, Faults faults) {

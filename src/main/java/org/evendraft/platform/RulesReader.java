@@ -104,6 +104,9 @@ final class RulesReader {
                 fields.optionalNumber("windSpeed", Range.NOT_NEGATIVE),
                 fields.choice("limitAngle", Criterion.LimitAngle.class, Criterion.LimitAngle.LESSER),
                 fields.choice("openings", Criterion.Openings.class, Criterion.Openings.NOT_WEATHERTIGHT));
+        if (measure.filter(Criterion.Measure.LEAST_GM::equals).isPresent() && situation != Situation.INTACT) {
+            fields.meaning("measure", "leastGm is a measure of the intact platform alone");
+        }
         fields.noOthers();
         return criterion;
     }

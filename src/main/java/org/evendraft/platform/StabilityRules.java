@@ -19,8 +19,17 @@ public record StabilityRules(String rules, boolean assumed, List<Criterion> crit
         criteria = List.copyOf(criteria);
     }
 
-    /** Those of a situation. */
-    public List<Criterion> of(Situation situation) {
-        return criteria.stream().filter(c -> c.situation() == situation).toList();
+    /** Those of a situation that are judged about axes, one after another: all but the least GM, which is found over all axes at once. */
+    public List<Criterion> byAxis(Situation situation) {
+        return criteria.stream()
+                .filter(c -> c.situation() == situation && c.measure() != Criterion.Measure.LEAST_GM)
+                .toList();
+    }
+
+    /** Those that ask for a least GM, all of them of the intact platform. */
+    public List<Criterion> ofLeastGm() {
+        return criteria.stream()
+                .filter(c -> c.measure() == Criterion.Measure.LEAST_GM)
+                .toList();
     }
 }

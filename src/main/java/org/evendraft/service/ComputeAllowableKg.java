@@ -90,9 +90,10 @@ public final class ComputeAllowableKg {
     public Pending<StoredJob> prepare(String platform, JsonNode request) {
         PlatformAtRevision at = shelf.current(platform);
         Wanted wanted = KgRequestReader.read(request, at.prepared());
+        Question damage = damage(at.prepared(), wanted);
         return jobs.prepare(
                 new NewJob(KIND, platform, at.revision(), AnswerJson.text(request)),
-                progress -> compute(at, wanted, progress, source));
+                progress -> compute(at, wanted.request(), damage, progress, source));
     }
 
     /**
@@ -102,13 +103,17 @@ public final class ComputeAllowableKg {
      */
     public static TracedKgCurve compute(
             PlatformAtRevision platform, JsonNode request, Progress progress, Provenance.Source source) {
-        return compute(platform, KgRequestReader.read(request, platform.prepared()), progress, source);
+        Wanted wanted = KgRequestReader.read(request, platform.prepared());
+        return compute(platform, wanted.request(), damage(platform.prepared(), wanted), progress, source);
     }
 
     private static TracedKgCurve compute(
-            PlatformAtRevision platform, Wanted wanted, Progress progress, Provenance.Source source) {
-        Question damage = damage(platform.prepared(), wanted);
-        KgRequest request = wanted.request().surviving(damage.cases());
+            PlatformAtRevision platform,
+            KgRequest wanted,
+            Question damage,
+            Progress progress,
+            Provenance.Source source) {
+        KgRequest request = wanted.surviving(damage.cases());
         StabilityRules rules = platform.prepared().platform().stabilityRules();
         OptionalDouble wind = request.windSpeed().isPresent()
                 ? request.windSpeed()
@@ -139,7 +144,8 @@ public final class ComputeAllowableKg {
     /**
      * Checks a curve that a mode shall have.
      *
-     * @param request {@code {"job": id}} for the result of a job, or {@code {"points": [[draft, kg], …]}}
+     * @param request {@code {"job": id}} for the result of a job, with {@code "despiteGaps": true} even when something could not be judged;
+     *     or {@code {"points": [[draft, kg], …]}}
      * @param expected the platform's revision that it is for; empty for the current one
      * @throws Refusal when there is no such platform, mode or job, or the job has no result
      * @throws FaultyDocumentException when the curve is not one that the platform can have
@@ -184,15 +190,16 @@ public final class ComputeAllowableKg {
         List<KgPoint> points = fields.rows("points", 2, Range.COORDINATE).stream()
                 .map(row -> new KgPoint(row[0], row[1]))
                 .toList();
+        boolean despiteGaps = fields.flag("despiteGaps", false);
         fields.noOthers();
         if (fields.has("points") && points.isEmpty() && faults.count() == 0) {
             fields.form("points", "points must have at least one entry");
         }
         faults.throwIfAny();
-        return byJob ? ofJob(platform, mode, job) : points;
+        return byJob ? ofJob(platform, mode, job, despiteGaps) : points;
     }
 
-    private List<KgPoint> ofJob(StoredPlatform platform, String mode, String id) {
+    private List<KgPoint> ofJob(StoredPlatform platform, String mode, String id, boolean despiteGaps) {
         StoredJob job = jobs.read(id);
         if (!job.kind().equals(KIND) || !job.platform().equals(platform.id())) {
             throw fault("job " + id + " did not compute a greatest KG of platform " + platform.id());
@@ -205,11 +212,28 @@ public final class ComputeAllowableKg {
             throw fault("job " + id + " has no result");
         }
         JsonNode result = StoredJson.tree(jobs.result(id));
+        if (!despiteGaps) {
+            refuseGaps(result);
+        }
         if (!mode.equals(result.path("mode").textValue())) {
             throw fault("job " + id + " was computed for mode "
                     + result.path("mode").textValue());
         }
         return ofResult(result);
+    }
+
+    /** A curve that leaves something out is not made a limit unless whoever asks says so. */
+    private static void refuseGaps(JsonNode result) {
+        if (result.path("rulesAssumed").booleanValue()) {
+            throw fault("the platform's document names no rules, and "
+                    + result.path("rules").textValue() + " were assumed; name them, or say despiteGaps");
+        }
+        for (JsonNode limit : result.path("limits")) {
+            if (!limit.path("notJudged").isEmpty()) {
+                throw fault("not everything could be judged: "
+                        + limit.path("notJudged").get(0).textValue() + "; mend the document, or say despiteGaps");
+            }
+        }
     }
 
     private static List<KgPoint> ofResult(JsonNode result) {

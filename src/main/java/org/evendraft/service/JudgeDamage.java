@@ -4,6 +4,7 @@ import com.fasterxml.jackson.annotation.JsonUnwrapped;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.node.MissingNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.util.ArrayList;
 import java.util.Collections;
 import java.util.List;
 import java.util.OptionalDouble;
@@ -12,6 +13,7 @@ import org.evendraft.platform.DamageCase;
 import org.evendraft.platform.DamageCaseReader;
 import org.evendraft.platform.FaultyDocumentException;
 import org.evendraft.platform.Json;
+import org.evendraft.platform.Load;
 import org.evendraft.platform.Mode;
 import org.evendraft.platform.Platform;
 import org.evendraft.platform.PreparedPlatform;
@@ -20,6 +22,7 @@ import org.evendraft.service.Loadings.Loading;
 import org.evendraft.stability.DamageSurvey;
 import org.evendraft.stability.DamageSurvey.Question;
 import org.evendraft.stability.Progress;
+import org.evendraft.stability.WindSpeed;
 import org.evendraft.stability.damage.DamageExtents;
 import org.evendraft.stability.damage.GeneratedCases;
 import org.evendraft.store.NewJob;
@@ -134,14 +137,25 @@ public final class JudgeDamage {
     }
 
     private static TracedSurvey survey(Loading loading, Asked asked, Progress progress, Provenance.Source source) {
-        OptionalDouble wind = asked.windSpeed().isPresent()
-                ? asked.windSpeed()
-                : loading.condition().mode().map(Mode::windSpeed).orElseGet(OptionalDouble::empty);
+        OptionalDouble wind =
+                WindSpeed.counted(asked.windSpeed(), loading.condition().mode());
         DamageSurvey survey = DamageSurvey.of(loading.loaded(), question(loading, asked), wind, progress);
         return new TracedSurvey(survey, source.of(loading.platform().revision()));
     }
 
     private static Question question(Loading loading, Asked asked) {
+        List<String> notes = new ArrayList<>();
+        loading.platform().prepared().warnings().stream()
+                .filter(warning -> warning.contains(" overlap"))
+                .forEach(warning -> notes.add(warning + "; flooded together they lose that buoyancy twice."));
+        if (loading.condition().loads().stream().anyMatch(load -> load.kind() == Load.Kind.LINE)) {
+            notes.add(
+                    "The condition's loads of kind line stay; for the platform free of its moorings judge a condition without them.");
+        }
+        return cases(loading, asked).and(new Question(List.of(), List.of(), notes));
+    }
+
+    private static Question cases(Loading loading, Asked asked) {
         PreparedPlatform prepared = loading.platform().prepared();
         if (!asked.own().isMissingNode()) {
             DamageCase own = DamageCaseReader.read(asked.own(), prepared.platform());

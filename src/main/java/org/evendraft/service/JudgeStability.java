@@ -5,11 +5,11 @@ import com.fasterxml.jackson.databind.JsonNode;
 import java.util.OptionalDouble;
 import org.evendraft.platform.Condition;
 import org.evendraft.platform.FaultyDocumentException;
-import org.evendraft.platform.Mode;
 import org.evendraft.service.Loadings.Loading;
 import org.evendraft.stability.CriteriaAnswer;
 import org.evendraft.stability.RightingCurve;
 import org.evendraft.stability.WindAnswer;
+import org.evendraft.stability.WindSpeed;
 
 /** Judges the intact platform about every axis, and tells of the wind on it. */
 public final class JudgeStability {
@@ -119,9 +119,7 @@ public final class JudgeStability {
 
     /** The wind that counts: the one asked for, else that of the condition's mode (m/s). */
     static double speed(Condition condition, OptionalDouble windSpeed) {
-        OptionalDouble speed = windSpeed.isPresent()
-                ? windSpeed
-                : condition.mode().map(Mode::windSpeed).orElseGet(OptionalDouble::empty);
+        OptionalDouble speed = WindSpeed.counted(windSpeed, condition.mode());
         return speed.orElseThrow(() -> FaultyDocumentException.impossible(
                 "/mode",
                 condition.mode().isEmpty()

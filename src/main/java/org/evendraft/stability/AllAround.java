@@ -16,7 +16,7 @@ final class AllAround {
     static final double AZIMUTH_STEP = 10;
 
     private static final double GOLDEN = (Math.sqrt(5) - 1) / 2;
-    /** Divides the twenty degrees about the worst axis down to a third of a degree. */
+    /** Divides the twenty degrees about the worst axis down to half a degree. */
     private static final int CLOSER_LOOKS = 8;
 
     private final LoadedPlatform loaded;
@@ -49,24 +49,13 @@ final class AllAround {
 
     /** What each criterion comes to about an axis (degrees). */
     List<Finding> findings(List<Criterion> criteria, double azimuth) {
-        return findings(
-                criteria, new RightingCurve.Request(azimuth, GREATEST_ANGLE, ANGLE_STEP, true, LiquidTreatment.FREE));
-    }
-
-    /** What each criterion comes to on a curve. */
-    List<Finding> findings(List<Criterion> criteria, RightingCurve.Request curve) {
-        RightingArms arms = new RightingArms(loaded, curve, near);
-        return RightingArms.settled(() -> findings(criteria, arms));
-    }
-
-    private List<Finding> findings(List<Criterion> criteria, RightingArms arms) {
-        if (!arms.exists()) {
-            Finding none = Finding.broken("upright about this axis the trim finds no stable rest");
-            return criteria.stream().map(c -> none).toList();
-        }
-        AxisJudge judge =
-                new AxisJudge(new AxisStability(arms, loaded.prepared().platform()), modeWind);
-        return criteria.stream().map(judge::judge).toList();
+        RightingCurve.Request curve =
+                new RightingCurve.Request(azimuth, GREATEST_ANGLE, ANGLE_STEP, true, LiquidTreatment.FREE);
+        return AxisJudge.findings(
+                criteria,
+                RightingArms.fromRest(loaded, curve, near),
+                loaded.prepared().platform(),
+                modeWind);
     }
 
     /** The criteria about their worst axes; the least GM is not among them. */

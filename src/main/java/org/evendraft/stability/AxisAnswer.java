@@ -5,10 +5,9 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
-import java.util.stream.IntStream;
 import org.evendraft.platform.Criterion;
-import org.evendraft.platform.Criterion.Measure;
 import org.evendraft.platform.Mode;
+import org.evendraft.platform.Platform;
 import org.evendraft.platform.Situation;
 import org.evendraft.platform.StabilityRules;
 import org.evendraft.stability.Equilibrium.Afloat;
@@ -52,51 +51,57 @@ public record AxisAnswer(
             Optional<Mode> mode,
             OptionalDouble windSpeed,
             RightingCurve.Request request) {
-        OptionalDouble wind = IntactStability.wind(mode, windSpeed);
-        RightingArms arms = new RightingArms(loaded, request);
-        return RightingArms.settled(() -> of(loaded, afloat, mode, wind, request, arms));
-    }
-
-    private static AxisAnswer of(
-            LoadedPlatform loaded,
-            Afloat afloat,
-            Optional<Mode> mode,
-            OptionalDouble wind,
-            RightingCurve.Request request,
-            RightingArms arms) {
-        Optional<AxisStability> axis = arms.exists()
-                ? Optional.of(new AxisStability(arms, loaded.prepared().platform()))
-                : Optional.empty();
+        OptionalDouble wind = WindSpeed.counted(windSpeed, mode);
+        RightingArms upright = RightingArms.fromUpright(loaded, request);
+        RightingArms judged = RightingArms.fromRest(loaded, request.forCriteria(), Slopes.of(afloat.waterplane()));
         StabilityRules rules = loaded.prepared().platform().stabilityRules();
         return new AxisAnswer(
-                arms.curve(request),
-                axis.isPresent() && wind.isPresent() ? windCurve(axis.get(), wind.getAsDouble()) : null,
-                openings(loaded, afloat, axis),
+                upright.curve(request),
+                wind.isPresent() ? windCurve(loaded, upright, judged, wind.getAsDouble()) : null,
+                HeelStates.settled(() -> openings(loaded, afloat, judged)),
                 rules.rules(),
                 rules.assumed(),
-                criteria(loaded, afloat, mode, wind, request));
+                criteria(loaded, mode, wind, judged, request));
     }
 
-    /** The wind at the nodes of the curve. */
-    static WindCurve windCurve(AxisStability axis, double speed) {
-        RightingArms arms = axis.arms();
-        int last = (int) Math.round(arms.endRad() / arms.stepRad());
-        List<WindPoint> points = IntStream.rangeClosed(0, last)
-                .mapToObj(i -> {
-                    double angle = i * arms.stepRad();
-                    WindForce force = axis.force(arms.at(angle), speed);
-                    return new WindPoint(Math.toDegrees(angle), force.force(), force.moment(), force.arm());
-                })
-                .toList();
-        return new WindCurve(speed, points, degrees(axis.rest(speed)), degrees(axis.secondIntercept(speed)));
+    /**
+     * The wind that heels about the axis of two curves.
+     *
+     * @param upright from upright on: its nodes are the points
+     * @param judged from the platform's rest on: there the intercepts are found
+     */
+    static WindCurve windCurve(LoadedPlatform loaded, RightingArms upright, RightingArms judged, double speed) {
+        Platform platform = loaded.prepared().platform();
+        List<WindPoint> points = HeelStates.settled(() -> upright.exists()
+                ? upright.points().stream()
+                        .map(point -> point(new AxisStability(upright, platform), point, speed))
+                        .toList()
+                : List.of());
+        return HeelStates.settled(() -> {
+            Optional<AxisStability> axis =
+                    judged.exists() ? Optional.of(new AxisStability(judged, platform)) : Optional.empty();
+            return new WindCurve(
+                    speed,
+                    points,
+                    axis.map(a -> degrees(a.rest(speed))).orElse(null),
+                    axis.map(a -> degrees(a.secondIntercept(speed))).orElse(null));
+        });
+    }
+
+    private static WindPoint point(AxisStability axis, RightingPoint point, double speed) {
+        WindForce force = axis.force(axis.arms().at(Math.toRadians(point.angle())), speed);
+        return new WindPoint(point.angle(), force.force(), force.moment(), force.arm());
     }
 
     private static @Nullable Double degrees(OptionalDouble angleRad) {
         return angleRad.isPresent() ? Double.valueOf(Math.toDegrees(angleRad.getAsDouble())) : null;
     }
 
-    private static List<OpeningImmersion> openings(LoadedPlatform loaded, Afloat afloat, Optional<AxisStability> axis) {
-        return loaded.prepared().platform().openings().stream()
+    private static List<OpeningImmersion> openings(LoadedPlatform loaded, Afloat afloat, RightingArms judged) {
+        Platform platform = loaded.prepared().platform();
+        Optional<AxisStability> axis =
+                judged.exists() ? Optional.of(new AxisStability(judged, platform)) : Optional.empty();
+        return platform.openings().stream()
                 .map(opening -> new OpeningImmersion(
                         opening.id(),
                         opening.closing(),
@@ -107,18 +112,15 @@ public record AxisAnswer(
 
     private static List<CriterionResult> criteria(
             LoadedPlatform loaded,
-            Afloat afloat,
             Optional<Mode> mode,
             OptionalDouble wind,
+            RightingArms judged,
             RightingCurve.Request request) {
-        StabilityRules rules = loaded.prepared().platform().stabilityRules();
-        List<CriterionResult> results = new ArrayList<>(
-                IntactStability.metacentric(rules, mode, loaded.evenKeel().gm()));
-        List<Criterion> byAxis = rules.of(Situation.INTACT).stream()
-                .filter(c -> c.measure() != Measure.LEAST_GM)
-                .toList();
-        List<Finding> findings =
-                new AllAround(loaded, Slopes.of(afloat.waterplane()), wind).findings(byAxis, request.forCriteria());
+        Platform platform = loaded.prepared().platform();
+        List<CriterionResult> results = new ArrayList<>(IntactStability.metacentric(
+                platform.stabilityRules(), mode, loaded.evenKeel().gm()));
+        List<Criterion> byAxis = platform.stabilityRules().byAxis(Situation.INTACT);
+        List<Finding> findings = AxisJudge.findings(byAxis, judged, platform, wind);
         for (int i = 0; i < findings.size(); i++) {
             Criterion criterion = byAxis.get(i);
             results.add(findings.get(i).result(criterion, null, request.azimuth(), AxisJudge.wind(criterion, wind)));

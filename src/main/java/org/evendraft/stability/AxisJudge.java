@@ -1,13 +1,21 @@
 package org.evendraft.stability;
 
+import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import org.evendraft.platform.Criterion;
+import org.evendraft.platform.Platform;
 
 /** Judges criteria about one axis. */
 final class AxisJudge {
     private static final Finding NO_REST = Finding.broken("the platform finds no rest under the wind within the curve");
+
+    private static final Finding NO_HEELING =
+            Finding.notJudged("no heeling moment about this axis: no wind, or no windage that meets it");
+
+    /** The arm next to its zero tells nothing (rad). */
+    private static final double FIRST_DEGREE = Math.toRadians(1);
 
     private final AxisStability axis;
     private final OptionalDouble modeWind;
@@ -16,6 +24,19 @@ final class AxisJudge {
     AxisJudge(AxisStability axis, OptionalDouble modeWind) {
         this.axis = axis;
         this.modeWind = modeWind;
+    }
+
+    /** What each criterion comes to on a curve. */
+    static List<Finding> findings(
+            List<Criterion> criteria, RightingArms arms, Platform platform, OptionalDouble modeWind) {
+        if (!arms.exists()) {
+            Finding none = Finding.broken("about this axis the trim finds no stable rest where the platform floats");
+            return criteria.stream().map(c -> none).toList();
+        }
+        return HeelStates.settled(() -> {
+            AxisJudge judge = new AxisJudge(new AxisStability(arms, platform), modeWind);
+            return criteria.stream().map(judge::judge).toList();
+        });
     }
 
     /** The wind that a criterion counts (m/s); empty when it is that of a mode and none is known. */
@@ -43,32 +64,48 @@ final class AxisJudge {
 
     private Finding areaRatio(Criterion criterion, double wind) {
         if (!axis.isHeeledBy(wind)) {
-            return noHeeling();
+            return NO_HEELING;
+        }
+        if (!axis.arms().reachesUpright()) {
+            return Finding.broken("the platform has no rest upright about this axis, from where areas count");
         }
         AxisStability.Place limit = axis.limit(criterion, wind);
+        if (!limit.isTheLimit()) {
+            return Finding.broken(
+                    "the curve comes to " + limit.what() + ", before an opening that counts meets the water");
+        }
         if (limit.angleRad() <= 0) {
             return Finding.broken("upright already, " + limit.what());
         }
         return Finding.of(axis.areaRatio(wind, limit.angleRad()), limit.angleRad(), "to " + limit.what());
     }
 
-    private static Finding noHeeling() {
-        return Finding.notJudged("no heeling moment: no wind, or the platform lists no windage");
+    /**
+     * The arm shall stay over 0 between rest and second intercept. It is 0 at the rest itself, so the first degree beyond is left out. Counted
+     * from the platform's own rest where its upright position is stable, for a list is no lack of stability; else from upright.
+     */
+    private Finding leastArm(double wind) {
+        if (!axis.isHeeledBy(wind)) {
+            return NO_HEELING;
+        }
+        OptionalDouble own = axis.rest(0);
+        if (own.isEmpty() || axis.rest(wind).isEmpty()) {
+            return NO_REST;
+        }
+        RightingArms arms = axis.arms();
+        double from = isUnstableUpright(arms) ? 0 : own.getAsDouble();
+        OptionalDouble second = axis.secondIntercept(wind);
+        AxisStability.Place end = axis.end(true);
+        double to = second.orElse(end.angleRad());
+        double least = arms.greatest(at -> -arms.arm(at), Math.min(to, from + FIRST_DEGREE), to);
+        String what = second.isPresent() ? "the second intercept" : end.what();
+        return Finding.of(arms.arm(arms.at(least)), least, "from a degree beyond its rest to " + what);
     }
 
-    /** From the platform's own rest, where its upright position is stable: a list is no lack of stability; else from upright. */
-    private Finding leastArm(double wind) {
-        RightingArms arms = axis.arms();
-        double near = arms.stepRad() / 2;
-        if (arms.endRad() < near) {
-            return Finding.broken("the curve ends upright, where the trim loses its rest");
-        }
-        boolean rises = arms.arm(arms.at(near)) > arms.arm(arms.at(0));
-        double from = rises ? axis.rest(0).orElse(0) : 0;
-        double to = axis.secondIntercept(wind).orElse(arms.endRad());
-        double first = Math.min(to, from + near);
-        double least = arms.greatest(at -> -arms.arm(at), first, to);
-        return Finding.of(arms.arm(arms.at(least)), least, "from half a step beyond its rest to the second intercept");
+    private static boolean isUnstableUpright(RightingArms arms) {
+        return arms.reachesUpright()
+                && arms.endRad() > FIRST_DEGREE
+                && arms.arm(arms.at(FIRST_DEGREE)) < arms.arm(arms.at(0));
     }
 
     private Finding inclination(double wind) {
@@ -92,7 +129,7 @@ final class AxisJudge {
 
     private Finding armRatio(Criterion criterion, double wind) {
         if (!axis.isHeeledBy(wind)) {
-            return noHeeling();
+            return NO_HEELING;
         }
         OptionalDouble rest = axis.rest(wind);
         if (rest.isEmpty()) {

@@ -18,6 +18,9 @@ import org.evendraft.platform.Platform;
  * it has found; one thread at a time.
  */
 final class AxisStability {
+    /** A heeling arm under this is none (m). */
+    private static final double LEAST_HEELING = 1e-6;
+
     /** Error allowed in areas under one degree of a curve, where criteria compare them (m·rad): a thousandth of a usual ratio's digit. */
     private static final double AREA_TOLERANCE = 1e-5;
 
@@ -36,28 +39,36 @@ final class AxisStability {
     }
 
     /**
-     * A place on the curve.
+     * A place on the curve where areas or ranges end.
      *
      * @param angleRad the angle (rad)
      * @param what what it is, in words
+     * @param isTheLimit whether it is what the criterion asks for, not the end of what is known
      */
-    record Place(double angleRad, String what) {}
+    record Place(double angleRad, String what, boolean isTheLimit) {}
 
     RightingArms arms() {
         return arms;
     }
 
-    /** Whether a wind of a speed (m/s) heels the platform at all. */
+    /** Whether a wind of a speed (m/s) heels the platform about this axis, where it rests without. */
     boolean isHeeledBy(double speed) {
-        return speed > 0 && wind.meetsSomething();
+        return speed > 0
+                && wind.meetsSomething()
+                && force(arms.at(ownRest()), speed).arm() > LEAST_HEELING;
+    }
+
+    /** Where the platform rests without wind, or the curve begins where there is no such place (rad). */
+    private double ownRest() {
+        return rest(0).orElse(arms.startRad());
     }
 
     /** The wind's heeling arm by the platform's state (m). */
     ToDoubleFunction<Inclination> heeling(double speed) {
-        return isHeeledBy(speed) ? at -> force(at, speed).arm() : at -> 0;
+        return speed > 0 && wind.meetsSomething() ? at -> force(at, speed).arm() : at -> 0;
     }
 
-    /** The wind's force (m/s). */
+    /** The wind's force on the platform at a state, at a speed (m/s). */
     WindForce force(Inclination at, double speed) {
         return wind.on(at, arms.leeward(at), speed);
     }
@@ -87,18 +98,18 @@ final class AxisStability {
         return arms.greatest(at -> ratio(at, speed), fromRad, toRad);
     }
 
-    /** Righting over heeling arm at a state. */
+    /** Righting over heeling arm at a state; a heeling arm under the least that counts is taken as that. */
     double ratio(Inclination at, double speed) {
-        return arms.arm(at) / heeling(speed).applyAsDouble(at);
+        return arms.arm(at) / Math.max(LEAST_HEELING, heeling(speed).applyAsDouble(at));
     }
 
-    /** Where an opening first meets the water (rad); empty when that is not on the curve. */
+    /** Where an opening first meets the water from the platform's own rest on (rad); empty when that is not on the curve. */
     OptionalDouble immersion(Opening opening) {
         return immersion(at -> at.waterplane().freeboard(opening.position()));
     }
 
     private OptionalDouble immersion(ToDoubleFunction<Inclination> height) {
-        double start = arms.startRad();
+        double start = ownRest();
         return height.applyAsDouble(arms.at(start)) <= 0
                 ? OptionalDouble.of(start)
                 : arms.crossing(height, start, RightingArms.FAR, false);
@@ -115,7 +126,7 @@ final class AxisStability {
         return angle.stream()
                 .boxed()
                 .flatMap(a -> lowest(counted, arms.at(a)).stream()
-                        .map(low -> new Place(a, "opening " + low.opening() + " meets the water")))
+                        .map(low -> new Place(a, "opening " + low.opening() + " meets the water", true)))
                 .findFirst();
     }
 
@@ -135,25 +146,35 @@ final class AxisStability {
      */
     record Lowest(double height, String opening) {}
 
-    /** Where a criterion's areas and ranges end; at the end of the curve when what ends them is not on it. */
+    /**
+     * Where a criterion's areas and ranges end; at the end of the curve when what ends them is not on it. When the curve ends where the trim
+     * loses its rest, no opening has met the water and the arms have passed the second intercept, then {@link LimitAngle#DOWNFLOODING} has no
+     * place.
+     */
     Place limit(Criterion criterion, double speed) {
         LimitAngle wanted = criterion.limitAngle();
         Optional<Place> flooding =
                 wanted == LimitAngle.SECOND_INTERCEPT ? Optional.empty() : downflooding(criterion.openings());
-        if (flooding.isPresent() && wanted == LimitAngle.DOWNFLOODING) {
+        boolean toOpening =
+                wanted == LimitAngle.DOWNFLOODING && openings.stream().anyMatch(criterion.openings()::count);
+        if (flooding.isPresent() && toOpening) {
             return flooding.get();
         }
         OptionalDouble second =
                 flooding.isPresent() ? secondIntercept(speed, flooding.get().angleRad()) : secondIntercept(speed);
-        if (second.isPresent()) {
-            return new Place(second.getAsDouble(), "the second intercept");
+        if (toOpening) {
+            return end(arms.complete() || second.isEmpty());
         }
-        return flooding.orElseGet(this::end);
+        if (second.isPresent()) {
+            return new Place(second.getAsDouble(), "the second intercept", true);
+        }
+        return flooding.orElseGet(() -> end(true));
     }
 
-    private Place end() {
-        return new Place(
-                arms.endRad(),
-                arms.complete() ? "the curve's last angle" : "the end of the curve, where the trim loses its rest");
+    /** The end of the curve. */
+    Place end(boolean isTheLimit) {
+        String what =
+                arms.complete() ? "the curve's last angle" : "the end of the curve, where the trim loses its rest";
+        return new Place(arms.endRad(), what, isTheLimit);
     }
 }

@@ -15,7 +15,8 @@ import org.jspecify.annotations.Nullable;
  * @param rulesAssumed whether the platform names none and these were taken for want of better
  * @param windSpeed wind of the mode, or the one asked for (m/s)
  * @param azimuthStep between the axes looked at, before the worst is looked at more closely (degrees)
- * @param met whether every criterion that could be judged is met
+ * @param met whether every criterion that could be judged is met; null when none could
+ * @param notJudged names of the criteria that could not be judged
  * @param criteria the criteria, each about its worst axis
  */
 public record CriteriaAnswer(
@@ -23,11 +24,13 @@ public record CriteriaAnswer(
         boolean rulesAssumed,
         @Nullable Double windSpeed,
         double azimuthStep,
-        boolean met,
+        @Nullable Boolean met,
+        List<String> notJudged,
         List<CriterionResult> criteria) {
 
-    /** Copies the list. */
+    /** Copies the lists. */
     public CriteriaAnswer {
+        notJudged = List.copyOf(notJudged);
         criteria = List.copyOf(criteria);
     }
 
@@ -35,14 +38,18 @@ public record CriteriaAnswer(
     public static CriteriaAnswer of(
             LoadedPlatform loaded, Afloat afloat, Optional<Mode> mode, OptionalDouble windSpeed) {
         StabilityRules rules = loaded.prepared().platform().stabilityRules();
-        OptionalDouble wind = IntactStability.wind(mode, windSpeed);
+        OptionalDouble wind = WindSpeed.counted(windSpeed, mode);
         List<CriterionResult> results = IntactStability.judge(loaded, afloat, mode, windSpeed);
         return new CriteriaAnswer(
                 rules.rules(),
                 rules.assumed(),
                 wind.isPresent() ? Double.valueOf(wind.getAsDouble()) : null,
                 AllAround.AZIMUTH_STEP,
-                results.stream().noneMatch(CriterionResult::isBroken),
+                CriterionResult.allMet(results),
+                results.stream()
+                        .filter(r -> r.met() == null)
+                        .map(CriterionResult::criterion)
+                        .toList(),
                 results);
     }
 }

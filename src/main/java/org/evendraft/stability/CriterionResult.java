@@ -1,5 +1,6 @@
 package org.evendraft.stability;
 
+import java.util.List;
 import org.jspecify.annotations.Nullable;
 
 /**
@@ -29,6 +30,14 @@ public record CriterionResult(
         @Nullable Double angle,
         @Nullable Double windSpeed,
         String note) {
+
+    /** Whether all criteria that were judged are met; null when none was. */
+    static @Nullable Boolean allMet(List<CriterionResult> results) {
+        if (results.stream().anyMatch(CriterionResult::isBroken)) {
+            return false;
+        }
+        return results.stream().allMatch(r -> r.met() == null) ? null : Boolean.TRUE;
+    }
 
     /** Whether it is judged and not met. */
     boolean isBroken() {

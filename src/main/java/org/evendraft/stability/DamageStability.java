@@ -56,7 +56,7 @@ public final class DamageStability {
                         .map(o -> new OpeningHeight(o.id(), o.closing(), at.freeboard(o.position())))
                         .toList(),
                 new AllAround(damaged, Slopes.of(at), modeWind)
-                        .results(platform.stabilityRules().of(damage.situation()), damage.id()));
+                        .results(platform.stabilityRules().byAxis(damage.situation()), damage.id()));
     }
 
     private static DamagedPosition position(LoadedPlatform damaged, Waterplane at) {

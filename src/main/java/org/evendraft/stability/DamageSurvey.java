@@ -19,7 +19,7 @@ import org.jspecify.annotations.Nullable;
  *
  * @param rules name of the rules that the criteria start from
  * @param rulesAssumed whether the platform names none and these were taken for want of better
- * @param survived whether it floats in every case and breaks no criterion in any
+ * @param survived whether it floats in every case and breaks no criterion in any; null when no criterion was judged
  * @param worstCase id of the case that comes nearest to the end, or goes beyond it; null without cases
  * @param why what makes it the worst, in a sentence
  * @param worst each criterion in the case and about the axis where it is nearest to its bound
@@ -29,7 +29,7 @@ import org.jspecify.annotations.Nullable;
 public record DamageSurvey(
         String rules,
         boolean rulesAssumed,
-        boolean survived,
+        @Nullable Boolean survived,
         @Nullable String worstCase,
         String why,
         List<CriterionResult> worst,
@@ -89,14 +89,14 @@ public record DamageSurvey(
         List<CriterionResult> worst = worstOfEach(results);
         Optional<DamageResult> lost = results.stream()
                 .filter(r -> r.outcome() != DamageResult.Outcome.AFLOAT)
-                .findFirst();
+                .min(Comparator.comparing(r -> r.outcome() != DamageResult.Outcome.SINKS));
         Optional<CriterionResult> nearest = worst.stream()
                 .filter(c -> c.met() != null)
                 .min(Comparator.comparingDouble(DamageSurvey::relativeUrgency));
         return new DamageSurvey(
                 rules.rules(),
                 rules.assumed(),
-                results.stream().allMatch(DamageResult::survives),
+                lost.isPresent() ? Boolean.FALSE : CriterionResult.allMet(worst),
                 lost.map(DamageResult::damageCase)
                         .or(() -> nearest.map(CriterionResult::damageCase))
                         .orElse(null),
@@ -128,13 +128,13 @@ public record DamageSurvey(
         Double azimuth = result.azimuth();
         return String.format(
                 Locale.ROOT,
-                "%s (%s) %s: %s where the bound is %.2f, about the axis %.0f°, %s.",
+                "%s (%s) %s: %s where the bound is %.2f%s, %s.",
                 result.criterion(),
                 result.clause(),
                 result.isBroken() ? "is not met" : "has the least margin",
                 value == null ? "no value" : String.format(Locale.ROOT, "%.2f", value),
                 result.bound(),
-                azimuth == null ? 0 : azimuth,
+                azimuth == null ? "" : String.format(Locale.ROOT, ", about the axis %.0f°", azimuth),
                 result.note());
     }
 }

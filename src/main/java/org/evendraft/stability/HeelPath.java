@@ -20,10 +20,14 @@ final class HeelPath {
     /** Two states lie on a smooth path when the tangent at one misses tan(trim) at the other by less than this. */
     private static final double SMOOTH = 0.01;
 
-    /** A change of tan(trim) beyond this in one step is a leap, unless smaller steps lead there. */
-    private static final double LEAP = 0.08;
+    /** No further than so many times their distance do two states foretell a third. */
+    private static final double FURTHEST = 4;
 
-    private static final int MOST_HALVINGS = 5;
+    /** Between two states of one path tan(trim) changes as its slopes at both tell, within this; across a fold it leaps. */
+    private static final double LEAP = 3e-3;
+
+    /** The end of a path is found to this (rad). */
+    static final double SHORTEST_STEP = Math.toRadians(0.01);
 
     private final Slopes alongHeel;
     private final Slopes alongTrim;
@@ -40,27 +44,39 @@ final class HeelPath {
     }
 
     /**
-     * The platform at an angle, followed from a state on the path without a leap of the trim: in halved steps where the trim turns fast.
+     * How far a path was followed.
+     *
+     * @param angleRad the angle reached (rad)
+     * @param state the platform there
+     */
+    record Reached(double angleRad, Inclination state) {}
+
+    /**
+     * Follows the path from a state towards an angle without a leap of the trim, in shorter steps where the trim turns fast, until it
+     * arrives or the path ends: beyond a fold the trim rests elsewhere or nowhere.
      *
      * @param from where the path is followed from
      * @param before a state on the path further off, with which the trim is foreseen
-     * @param angleRad inclination about the axis (rad)
-     * @return empty where the path ends before: beyond a fold the trim rests elsewhere or nowhere
+     * @param angleRad inclination about the axis to be reached (rad)
+     * @return the angle itself, or the last one within {@link #SHORTEST_STEP} of the path's end
      */
-    Optional<Inclination> follow(Inclination from, Inclination before, double angleRad) {
-        return follow(from, before, angleRad, MOST_HALVINGS);
-    }
-
-    private Optional<Inclination> follow(Inclination from, Inclination before, double angleRad, int halvings) {
-        Optional<Inclination> found = at(from, before, angleRad);
-        if (found.isPresent() && Math.abs(tau(found.get()) - tau(from)) <= LEAP) {
-            return found;
+    Reached follow(Reached from, Reached before, double angleRad) {
+        Reached here = from;
+        Reached last = before;
+        double step = angleRad - from.angleRad();
+        double shortest = Math.min(SHORTEST_STEP, Math.abs(step));
+        while (here.angleRad() != angleRad && Math.abs(step) >= shortest) {
+            boolean whole = Math.abs(angleRad - here.angleRad()) <= Math.abs(step);
+            double next = whole ? angleRad : here.angleRad() + step;
+            Optional<Inclination> found = at(here.state(), last.state(), next);
+            if (found.isPresent() && isSmooth(here.state(), found.get())) {
+                last = here;
+                here = new Reached(next, found.get());
+            } else {
+                step = (next - here.angleRad()) / 2;
+            }
         }
-        if (halvings == 0) {
-            return Optional.empty();
-        }
-        double middle = (Math.atan(phi(from)) + angleRad) / 2;
-        return follow(from, before, middle, halvings - 1).flatMap(m -> follow(m, from, angleRad, halvings - 1));
+        return here;
     }
 
     /**
@@ -108,12 +124,18 @@ final class HeelPath {
         double step = phi(other) - from;
         double tangent = tau(near) + slope(near) * (phi - from);
         double miss = tau(other) - tau(near) - slope(near) * step;
-        if (step == 0 || !(Math.abs(miss) < SMOOTH)) {
+        if (FURTHEST * Math.abs(step) <= Math.abs(phi - from) || !(Math.abs(miss) < SMOOTH)) {
             return Math.abs(tangent - tau(near)) < LONGEST_STEP ? tangent : tau(near);
         }
         double part = (phi - from) / step;
         double turn = (slope(other) - slope(near)) * step;
         return tangent + part * part * (3 * miss - turn + part * (turn - 2 * miss));
+    }
+
+    /** Whether the trim has gone from one state to the other without a leap: by the trapezium of its slopes. */
+    private boolean isSmooth(Inclination from, Inclination to) {
+        double told = (slope(from) + slope(to)) / 2 * (phi(to) - phi(from));
+        return !freeTrim || Math.abs(tau(to) - tau(from) - told) <= LEAP;
     }
 
     private double phi(Inclination at) {

@@ -6,7 +6,6 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.stream.Stream;
 import org.evendraft.platform.Criterion;
-import org.evendraft.platform.Criterion.Measure;
 import org.evendraft.platform.GmBound;
 import org.evendraft.platform.Mode;
 import org.evendraft.platform.Situation;
@@ -29,10 +28,8 @@ public final class IntactStability {
     public static List<CriterionResult> judge(
             LoadedPlatform loaded, Afloat afloat, Optional<Mode> mode, OptionalDouble windSpeed) {
         StabilityRules rules = loaded.prepared().platform().stabilityRules();
-        List<Criterion> byAxis = rules.of(Situation.INTACT).stream()
-                .filter(c -> c.measure() != Measure.LEAST_GM)
-                .toList();
-        OptionalDouble wind = wind(mode, windSpeed);
+        List<Criterion> byAxis = rules.byAxis(Situation.INTACT);
+        OptionalDouble wind = WindSpeed.counted(windSpeed, mode);
         AllAround around = new AllAround(loaded, Slopes.of(afloat.waterplane()), wind);
         return Stream.concat(
                         metacentric(rules, mode, loaded.evenKeel().gm()).stream(),
@@ -40,16 +37,10 @@ public final class IntactStability {
                 .toList();
     }
 
-    /** The wind that is counted: the one asked for, else that of the mode. */
-    static OptionalDouble wind(Optional<Mode> mode, OptionalDouble asked) {
-        return asked.isPresent() ? asked : mode.map(Mode::windSpeed).orElseGet(OptionalDouble::empty);
-    }
-
     /** The least GM over all axes by the rules, and the least GMs of the mode. */
     static List<CriterionResult> metacentric(StabilityRules rules, Optional<Mode> mode, ConditionResult.Gm gm) {
         List<CriterionResult> results = new ArrayList<>();
-        rules.of(Situation.INTACT).stream()
-                .filter(c -> c.measure() == Measure.LEAST_GM)
+        rules.ofLeastGm()
                 .forEach(c -> results.add(atLeast(
                         c.name(),
                         c.clause(),

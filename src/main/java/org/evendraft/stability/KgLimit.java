@@ -11,7 +11,7 @@ import org.jspecify.annotations.Nullable;
  * @param kmTransverse height of the transverse metacentre (m)
  * @param kmLongitudinal height of the longitudinal metacentre (m)
  * @param allowableKg the greatest KG, free-surface correction counted, for which every criterion holds (m); null when none was found
- * @param breaksAt a KG at most a millimetre higher, for which the governing criterion does not hold (m)
+ * @param breaksAt a KG a millimetre higher or less, for which the governing criterion does not hold (m)
  * @param criterion the governing criterion
  * @param clause where it stands
  * @param damageCase the governing damage case; null for the intact platform

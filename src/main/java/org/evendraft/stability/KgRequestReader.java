@@ -18,6 +18,9 @@ public final class KgRequestReader {
     /** Winds beyond this are none that blow (m/s). */
     private static final Range WIND = new Range(0, false, 150);
 
+    /** How far, without drafts given, the line between two drafts may allow too much (m). */
+    private static final double USUAL_REFINEMENT = 0.01;
+
     private static final int MOST_DRAFTS = 200;
     /** Drafts over a mode's range when none are given. */
     private static final int USUAL_DRAFTS = 5;
@@ -43,8 +46,8 @@ public final class KgRequestReader {
     public record Wanted(KgRequest request, Damage damage) {}
 
     /**
-     * Reads {@code {"mode", "drafts": [d, …] or {"from", "to", "step"}, "damage", "windSpeed", "waterDensity"}}. Without drafts five are
-     * taken over the mode's range.
+     * Reads {@code {"mode", "drafts": [d, …] or {"from", "to", "step"}, "refine", "damage", "windSpeed", "waterDensity"}}. Without drafts
+     * five are taken over the mode's range and refined.
      *
      * @throws FaultyDocumentException with all faults
      */
@@ -58,6 +61,9 @@ public final class KgRequestReader {
         OptionalDouble wind = fields.optionalNumber("windSpeed", WIND);
         double water =
                 fields.number("waterDensity", Range.DENSITY, prepared.platform().waterDensity());
+        OptionalDouble refine = fields.optionalNumber("refine", Range.POSITIVE);
+        OptionalDouble refineTo =
+                refine.isPresent() || fields.has("drafts") ? refine : OptionalDouble.of(USUAL_REFINEMENT);
         Damage damage = fields.choice("damage", Damage.class, Damage.LISTED);
         fields.noOthers();
         if (mode.isPresent() && mode.get().windSpeed().isEmpty() && wind.isEmpty()) {
@@ -65,7 +71,7 @@ public final class KgRequestReader {
                     "windSpeed", "windSpeed must be given: mode " + mode.get().id() + " has none");
         }
         faults.throwIfAny();
-        return new Wanted(new KgRequest(mode.orElseThrow(), drafts, wind, water, List.of()), damage);
+        return new Wanted(new KgRequest(mode.orElseThrow(), drafts, wind, water, refineTo, List.of()), damage);
     }
 
     /** Checks a wind speed that was not given in a document (m/s). */

@@ -6,9 +6,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.Set;
 import java.util.TreeSet;
-import java.util.function.DoublePredicate;
 import org.evendraft.platform.Criterion;
-import org.evendraft.platform.Criterion.Measure;
 import org.evendraft.platform.DamageCase;
 import org.evendraft.platform.Mode;
 import org.evendraft.platform.PreparedPlatform;
@@ -17,14 +15,23 @@ import org.evendraft.platform.StabilityRules;
 import org.jspecify.annotations.Nullable;
 
 /**
- * Finds the greatest KG at one draft. A criterion that holds at a KG is taken to hold at any lower one, so that one pass over all axes
- * and damage cases does: each lowers the limit that the ones before have left, by bisection to a millimetre, or leaves it. Then the
- * axes about the governing one are looked at more closely in the same way. Flooded tanks are taken as empty before, which loses
- * the most buoyancy. One thread at a time.
+ * Finds the greatest KG at one draft for which every criterion holds about every axis, whole and in every damage case: one axis after
+ * another lowers the limit that the ones before have left, by bisection to a millimetre, or leaves it. Then the axes about the
+ * governing one are looked at more closely in the same way. A criterion that holds at a KG mostly holds at every lower one, but not
+ * always, for a platform that is about to capsize has short curves; so each is also tried at lower KGs, and where it fails there the search
+ * goes on below. Flooded tanks are taken as empty before, which loses the most buoyancy. One thread at a time.
  */
 final class KgSearch {
     /** The limit is found to this (m). */
     static final double TOLERANCE = 1e-3;
+
+    /** Bisection ends here (m). */
+    private static final double CLOSENESS = TOLERANCE / 2;
+
+    /** At which parts of a limit, from the keel, criteria are tried: close together for the whole hull, whose curves are longest. */
+    private static final double[] TRIED_INTACT = {1, 0.9, 0.8, 0.7, 0.6, 0.5};
+
+    private static final double[] TRIED_DAMAGED = {1, 0.9};
 
     /** First step down from a KG that breaks a criterion (m), doubled until one holds. */
     private static final double FIRST_STEP = 0.25;
@@ -75,8 +82,6 @@ final class KgSearch {
         this.floating = LoadedPlatform.upright(
                 prepared, request.waterDensity(), draft, prepared.hull().lowest());
         this.evenKeel = floating.evenKeel();
-        this.limit = Double.POSITIVE_INFINITY;
-        this.breaksAt = Double.POSITIVE_INFINITY;
         this.governing = new Governing("none", "", null, null);
     }
 
@@ -101,18 +106,15 @@ final class KgSearch {
         double lowest = prepared.hull().lowest();
         Optional<Mode> mode = Optional.of(request.mode());
         StabilityRules rules = prepared.platform().stabilityRules();
+        limit = lowest + evenKeel.gm().least().corrected();
+        governing = new Governing("positiveGm", "a platform of no GM does not float upright", null, null);
         for (CriterionResult gm : IntactStability.metacentric(rules, mode, evenKeel.gm())) {
             if (gm.margin() != null && lowest + gm.margin() < limit) {
                 limit = lowest + gm.margin();
-                breaksAt = limit + TOLERANCE / 2;
                 governing = new Governing(gm.criterion(), gm.clause(), null, gm.azimuth());
             }
         }
-        if (limit == Double.POSITIVE_INFINITY) {
-            limit = lowest + evenKeel.gm().least().corrected();
-            breaksAt = limit;
-            governing = new Governing("positiveGm", "a platform of no GM does not float upright", null, null);
-        }
+        breaksAt = limit + CLOSENESS;
         if (limit < lowest) {
             limit = Double.NEGATIVE_INFINITY;
         }
@@ -121,27 +123,34 @@ final class KgSearch {
     private List<Hull> hulls() {
         StabilityRules rules = prepared.platform().stabilityRules();
         List<Hull> hulls = new ArrayList<>();
-        List<Criterion> intact = rules.of(Situation.INTACT).stream()
-                .filter(c -> c.measure() != Measure.LEAST_GM)
-                .toList();
+        List<Criterion> intact = rules.byAxis(Situation.INTACT);
         if (!intact.isEmpty()) {
             hulls.add(new Hull(null, intact, floating));
         }
         for (DamageCase damage : request.damageCases()) {
-            List<Criterion> criteria = rules.of(damage.situation());
+            List<Criterion> criteria = rules.byAxis(damage.situation());
             hulls.add(new Hull(damage.id(), criteria, floating.withFlooded(damage.flooded())));
         }
         return hulls;
     }
 
-    /** Lowers the limit to where a hull's criteria hold about an axis. */
+    /** Lowers the limit to where a hull's criteria hold about an axis, there and at the lower KGs where they are tried. */
     private void lowerBy(Hull hull, double azimuth) {
-        if (limit == Double.NEGATIVE_INFINITY || holds(hull, azimuth, limit)) {
-            return;
+        double tried = limit;
+        for (double part : hull.damageCase() == null ? TRIED_INTACT : TRIED_DAMAGED) {
+            double kg =
+                    prepared.hull().lowest() + part * (tried - prepared.hull().lowest());
+            if (limit > Double.NEGATIVE_INFINITY && kg <= limit && !holds(hull, azimuth, kg)) {
+                lowerFrom(hull, azimuth, kg);
+            }
         }
-        double high = limit;
+    }
+
+    /** Lowers the limit from a KG at which a hull's criteria do not hold about an axis. */
+    private void lowerFrom(Hull hull, double azimuth, double broken) {
+        double high = broken;
         double low = holding(hull, azimuth, high);
-        while (low > Double.NEGATIVE_INFINITY && high - low > TOLERANCE / 2) {
+        while (low > Double.NEGATIVE_INFINITY && high - low > CLOSENESS) {
             double middle = (low + high) / 2;
             if (holds(hull, azimuth, middle)) {
                 low = middle;
@@ -151,20 +160,19 @@ final class KgSearch {
         }
         limit = low;
         breaksAt = high;
-        Broken broken = broken(hull, azimuth, high).orElse(new Broken("afloat", "the platform floats upright"));
-        governing = new Governing(broken.criterion(), broken.clause(), hull, azimuth);
+        Broken what = broken(hull, azimuth, high).orElse(new Broken("afloat", "the platform floats upright"));
+        governing = new Governing(what.criterion(), what.clause(), hull, azimuth);
     }
 
     /** A lower KG for which the criteria hold; −∞ when they do not hold even with G at the lowest point of the hull. */
     private double holding(Hull hull, double azimuth, double from) {
         double lowest = prepared.hull().lowest();
-        DoublePredicate holds = kg -> holds(hull, azimuth, kg);
         for (double step = FIRST_STEP; from - step > lowest; step *= 2) {
-            if (holds.test(from - step)) {
+            if (holds(hull, azimuth, from - step)) {
                 return from - step;
             }
         }
-        return holds.test(lowest) ? lowest : Double.NEGATIVE_INFINITY;
+        return from > lowest && holds(hull, azimuth, lowest) ? lowest : Double.NEGATIVE_INFINITY;
     }
 
     private boolean holds(Hull hull, double azimuth, double kg) {
@@ -181,7 +189,7 @@ final class KgSearch {
         if (near.isEmpty()) {
             return Optional.of(new Broken("afloat", "the damaged platform floats"));
         }
-        OptionalDouble wind = IntactStability.wind(Optional.of(request.mode()), request.windSpeed());
+        OptionalDouble wind = WindSpeed.counted(request.windSpeed(), Optional.of(request.mode()));
         List<Finding> findings = new AllAround(loaded, near.get(), wind).findings(hull.criteria(), azimuth);
         for (int i = 0; i < findings.size(); i++) {
             Criterion criterion = hull.criteria().get(i);

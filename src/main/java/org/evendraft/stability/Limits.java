@@ -13,6 +13,9 @@ import org.evendraft.stability.ConditionResult.LimitResult;
 
 /** Judges a condition by the limits of its mode and of the deck areas. Margins are positive inside. */
 final class Limits {
+    /** Name of the limit that a mode's curve of KG sets. */
+    static final String ALLOWABLE_KG = "allowableKg";
+
     private final Condition condition;
     private final List<LimitResult> results = new ArrayList<>();
 
@@ -60,9 +63,9 @@ final class Limits {
     private void judgeKg(Mode mode, double correctedKg, double draft) {
         OptionalDouble allowable = AllowableKg.at(mode.allowableKg(), draft);
         if (allowable.isPresent()) {
-            atMost("allowableKg", correctedKg, allowable.getAsDouble());
+            atMost(ALLOWABLE_KG, correctedKg, allowable.getAsDouble());
         } else {
-            results.add(new LimitResult("allowableKg", correctedKg, null, null, false));
+            results.add(new LimitResult(ALLOWABLE_KG, correctedKg, null, null, false));
         }
     }
 

@@ -1,14 +1,10 @@
 package org.evendraft.stability;
 
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.List;
 import java.util.Locale;
-import java.util.Map;
-import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoubleUnaryOperator;
-import java.util.function.Supplier;
 import java.util.function.ToDoubleFunction;
 import org.apache.commons.math3.analysis.solvers.BrentSolver;
 import org.apache.commons.math3.optim.MaxEval;
@@ -20,15 +16,18 @@ import org.apache.commons.math3.optim.univariate.UnivariatePointValuePair;
 import org.evendraft.geometry.Vec3;
 import org.evendraft.platform.Condition.FreeSurface;
 
-/**
- * The righting arms of one platform about one axis, at nodes a step apart, each found from the one before when it is first asked for,
- * and exactly in between from the nearest node. Remembers what it has found; one thread at a time.
- */
+/** The righting arms of one platform about one axis, and what is read off them. Remembers what it has found; one thread at a time. */
 public final class RightingArms {
     /** Error of the area under one degree of the curve (m·rad). */
     private static final double AREA_TOLERANCE = 1e-6;
     /** Crossings are found to this angle (rad). */
     private static final double ANGLE_TOLERANCE = 1e-9;
+    /** The greatest of something is found to this part of its angle. */
+    private static final double GREATEST_TOLERANCE = 1e-8;
+    /** So small a part of a step does not make another. */
+    private static final double WHOLE_STEPS = 1e-9;
+    /** An arm under this is none (m). */
+    private static final double NO_ARM = 1e-9;
 
     /** So small a part of a step beside an angle, the sign of the arm tells on which side of a crossing the angle lies. */
     private static final double BESIDE = 1e-3;
@@ -37,47 +36,48 @@ public final class RightingArms {
     static final double FAR = Double.POSITIVE_INFINITY;
 
     private static final int MOST_EVALUATIONS = 200;
-    private static final int GREATEST_DEPTH = 10;
 
     private final HeelPath path;
-    private final double stepRad;
-    /** Places of the first and the last node, in steps from upright. */
-    private final int first;
+    private final HeelStates states;
+    private final boolean fromRest;
+    private OptionalDouble startRad = OptionalDouble.empty();
 
-    private final int last;
-    private final List<Inclination> nodes = new ArrayList<>();
-    private final Map<Double, Inclination> between = new HashMap<>();
-    private boolean ended;
-
-    RightingArms(LoadedPlatform loaded, RightingCurve.Request request) {
-        this(loaded, request, Slopes.LEVEL);
-    }
-
-    /** @param near slopes at which the platform floats: when it leans away from the axis's lower side, the curve begins before upright */
-    RightingArms(LoadedPlatform loaded, RightingCurve.Request request, Slopes near) {
+    private RightingArms(LoadedPlatform loaded, RightingCurve.Request request, Slopes near, boolean fromRest) {
         double azimuthRad = Math.toRadians(request.azimuth());
         this.path = new HeelPath(azimuthRad, request.freeTrim());
-        this.last = (int) Math.ceil(request.to() / request.step() - 1e-9);
-        this.stepRad = Math.toRadians(request.to() / last);
-        double lean = path.lean(near);
-        this.first = lean < 0 ? (int) Math.floor(lean / stepRad) - 1 : 0;
+        this.fromRest = fromRest;
+        int steps = (int) Math.ceil(request.to() / request.step() - WHOLE_STEPS);
+        double stepRad = Math.toRadians(request.to()) / steps;
         LoadedPlatform counted = counted(loaded, request.liquids(), azimuthRad);
-        add(path.at(Inclination.upright(counted).at(near), first * stepRad));
+        double lean = path.lean(near);
+        Inclination held = Inclination.upright(counted).at(near);
+        this.states = new HeelStates(path, lean, path.at(held, lean), stepRad, steps * stepRad);
     }
 
-    private void add(Optional<Inclination> node) {
-        node.ifPresentOrElse(nodes::add, () -> ended = true);
-        ended |= nodes.size() > last - first;
+    /** The arms from upright on. */
+    static RightingArms fromUpright(LoadedPlatform loaded, RightingCurve.Request request) {
+        return new RightingArms(loaded, request, Slopes.LEVEL, false);
     }
 
-    /** Follows the curve as far as an angle, if it goes so far. */
-    private boolean reaches(double angleRad) {
-        while (!ended && (first + nodes.size() - 1) * stepRad < angleRad) {
-            int count = nodes.size();
-            Inclination before = nodes.get(Math.max(0, count - 2));
-            add(path.follow(nodes.get(count - 1), before, (first + count) * stepRad));
+    /**
+     * The arms from before the platform's rest on, wherever that is: before upright when it leans away from the axis's lower side.
+     *
+     * @param near slopes at which the platform floats, or nearly
+     */
+    static RightingArms fromRest(LoadedPlatform loaded, RightingCurve.Request request, Slopes near) {
+        return new RightingArms(loaded, request, near, true);
+    }
+
+    /** Back from where the platform floats to the first node at which its arm drives it forward again (rad). */
+    private double beforeRest() {
+        double angle = states.seedRad();
+        while (states.reach(states.lowerNode(angle))) {
+            angle = states.lowerNode(angle);
+            if (arm(at(angle)) < -NO_ARM) {
+                return angle;
+            }
         }
-        return angleRad <= (first + nodes.size() - 1) * stepRad;
+        return states.startRad();
     }
 
     /** The platform with its liquids as the treatment has them: free, or at rest with G raised by the correction about the axis. */
@@ -89,93 +89,54 @@ public final class RightingArms {
         };
     }
 
-    /** Whether the curve exists at all: it has an upright. */
+    /** Whether the curve exists at all. */
     boolean exists() {
-        return !nodes.isEmpty() && reaches(0);
+        return states.areThere();
     }
 
     /** Whether it reaches the angle asked for. */
     boolean complete() {
-        return reaches(last * stepRad);
+        return states.areComplete();
     }
 
-    /** Its first angle (rad): 0, or less where the platform leans the other way. */
+    /** Whether it can be followed back to upright. */
+    boolean reachesUpright() {
+        return states.reach(0);
+    }
+
+    /** Where what happens on it begins (rad): upright, or a node before the platform's rest. */
     double startRad() {
-        return first * stepRad;
+        if (startRad.isEmpty()) {
+            startRad = OptionalDouble.of(fromRest ? beforeRest() : 0);
+        }
+        return startRad.getAsDouble();
     }
 
     /** The last angle of the curve (rad). */
     double endRad() {
-        reaches(last * stepRad);
-        return (first + nodes.size() - 1) * stepRad;
+        return states.endRad();
     }
 
     /** The angle between nodes (rad). */
     double stepRad() {
-        return stepRad;
+        return states.stepRad();
     }
 
     /** The points at the nodes from upright on. */
     List<RightingPoint> points() {
-        int count = (int) Math.round(endRad() / stepRad) + 1;
-        List<RightingPoint> points = new ArrayList<>(count);
+        List<RightingPoint> points = new ArrayList<>();
         double area = 0;
-        for (int i = 0; i < count; i++) {
-            double angle = i * stepRad;
-            area += i == 0 ? 0 : area(this::arm, (i - 1) * stepRad, angle, AREA_TOLERANCE);
+        for (int i = 0; states.reach(i * stepRad()); i++) {
+            double angle = i * stepRad();
+            area += i == 0 ? 0 : area(this::arm, (i - 1) * stepRad(), angle, AREA_TOLERANCE);
             points.add(path.point(at(angle), angle, area));
         }
         return points;
     }
 
-    /**
-     * The platform at an angle on the curve (rad), found from the nearest node, or else from the one on the angle's other side.
-     *
-     * @throws LostRestException when the trim finds no rest from either: no other angle's state stands in, and from then on the curve
-     *     ends at the node before
-     */
+    /** The platform at an angle on the curve (rad). Exceptions are those of {@link HeelStates#at}. */
     Inclination at(double angleRad) {
-        if (!reaches(angleRad)) {
-            throw new IllegalArgumentException(Math.toDegrees(angleRad) + "° is beyond the curve");
-        }
-        long nearest = Math.round(angleRad / stepRad);
-        if (nearest * stepRad == angleRad) {
-            return node(nearest);
-        }
-        Inclination known = between.get(angleRad);
-        if (known != null) {
-            return known;
-        }
-        Inclination near = node(nearest);
-        Inclination other = node(nearest * stepRad < angleRad ? nearest + 1 : nearest - 1);
-        Optional<Inclination> found = path.follow(near, other, angleRad).or(() -> path.follow(other, near, angleRad));
-        if (found.isEmpty()) {
-            endBefore(angleRad);
-            throw new LostRestException(angleRad);
-        }
-        between.put(angleRad, found.get());
-        return found.get();
-    }
-
-    private void endBefore(double angleRad) {
-        int kept = Math.max(0, (int) Math.floor(angleRad / stepRad) - first + 1);
-        nodes.subList(Math.min(kept, nodes.size()), nodes.size()).clear();
-        ended = true;
-    }
-
-    /** Something found on the curve; when the curve turns out to end earlier than its nodes told, found again on what is left of it. */
-    static <T> T settled(Supplier<T> search) {
-        while (true) {
-            try {
-                return search.get();
-            } catch (LostRestException e) {
-                // The curve is shorter now by a node at least, so this comes to an end.
-            }
-        }
-    }
-
-    private Inclination node(long place) {
-        return nodes.get((int) Math.min(nodes.size() - 1L, Math.max(0, place - first)));
+        return states.at(angleRad);
     }
 
     /** The point at an angle on the curve (rad). */
@@ -193,6 +154,12 @@ public final class RightingArms {
         return path.leeward(at);
     }
 
+    /** The next node, or the end of the curve where that comes first; the angle itself at the end (rad). */
+    private double next(double angleRad) {
+        double node = states.nextNode(angleRad);
+        return states.reach(node) ? node : Math.max(angleRad, endRad());
+    }
+
     /**
      * The first angle between two others at which something passes 0.
      *
@@ -206,13 +173,15 @@ public final class RightingArms {
         DoubleUnaryOperator signed = angle -> sign * what.applyAsDouble(at(angle));
         double low = fromRad;
         double atLow = signed.applyAsDouble(low);
-        while (low < toRad && reaches(nextNode(low))) {
-            double high = nextNode(low);
+        while (low < toRad) {
+            double high = Math.min(toRad, next(low));
+            if (high <= low) {
+                break;
+            }
             double atHigh = signed.applyAsDouble(high);
             if (atLow < 0 && atHigh >= 0) {
-                double found =
-                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, low, high);
-                return found <= toRad ? OptionalDouble.of(found) : OptionalDouble.empty();
+                return OptionalDouble.of(
+                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, low, high));
             }
             low = high;
             atLow = atHigh;
@@ -220,27 +189,23 @@ public final class RightingArms {
         return OptionalDouble.empty();
     }
 
-    private double nextNode(double angleRad) {
-        return (Math.floor(angleRad / stepRad + 1e-9) + 1) * stepRad;
-    }
-
-    /** The angle at which something is greatest between two angles (rad), to be found near a node where it is. */
+    /** The angle at which something is greatest between two angles of the curve (rad), to be found near a node where it is. */
     double greatest(ToDoubleFunction<Inclination> what, double fromRad, double toRad) {
         DoubleUnaryOperator byAngle = angle -> what.applyAsDouble(at(angle));
         double best = fromRad;
         double most = byAngle.applyAsDouble(fromRad);
         for (double angle = fromRad; angle < toRad; ) {
-            angle = Math.min(toRad, nextNode(angle));
+            angle = Math.min(toRad, next(angle));
             double here = byAngle.applyAsDouble(angle);
             best = here > most ? angle : best;
             most = Math.max(most, here);
         }
-        double low = Math.max(fromRad, best - stepRad);
-        double high = Math.min(toRad, best + stepRad);
+        double low = Math.max(fromRad, best - stepRad());
+        double high = Math.min(toRad, best + stepRad());
         if (!(high > low)) {
             return best;
         }
-        UnivariatePointValuePair found = new BrentOptimizer(1e-8, ANGLE_TOLERANCE)
+        UnivariatePointValuePair found = new BrentOptimizer(GREATEST_TOLERANCE, ANGLE_TOLERANCE)
                 .optimize(
                         new MaxEval(MOST_EVALUATIONS),
                         new UnivariateObjectiveFunction(byAngle::applyAsDouble),
@@ -250,7 +215,7 @@ public final class RightingArms {
     }
 
     /**
-     * Area under something between two angles (its unit·rad), by Simpson's rule halved until it settles.
+     * Area under something between two angles of the curve (its unit·rad), step by step by {@link Simpson}'s rule.
      *
      * @param tolerance error allowed under one degree of the curve
      */
@@ -259,7 +224,7 @@ public final class RightingArms {
         double sum = 0;
         double low = fromRad;
         while (low < toRad) {
-            double high = Math.min(toRad, nextNode(low));
+            double high = Math.min(toRad, next(low));
             sum += simpson.area(low, high);
             low = high;
         }
@@ -267,46 +232,18 @@ public final class RightingArms {
     }
 
     /**
-     * Simpson's rule with halved steps.
-     *
-     * @param what the integrand by angle (rad)
-     * @param tolerance error allowed for each radian
+     * Where the platform first rests under a heeling arm (m): there the righting arm less it passes 0 upwards. On a curve from upright, 0
+     * when it rests at or before upright.
      */
-    private record Simpson(DoubleUnaryOperator what, double tolerance) {
-        double area(double from, double to) {
-            double middle = (from + to) / 2;
-            return area(from, at(from), to, at(to), at(middle), GREATEST_DEPTH);
-        }
-
-        private double at(double angleRad) {
-            return what.applyAsDouble(angleRad);
-        }
-
-        private double area(double a, double atA, double b, double atB, double atMiddle, int depth) {
-            double m = (a + b) / 2;
-            double atLeft = at((a + m) / 2);
-            double atRight = at((m + b) / 2);
-            double whole = (b - a) / 6 * (atA + 4 * atMiddle + atB);
-            double halves = (b - a) / 12 * (atA + 4 * atLeft + 2 * atMiddle + 4 * atRight + atB);
-            if (depth == 0 || Math.abs(halves - whole) <= 15 * tolerance * (b - a)) {
-                return halves + (halves - whole) / 15;
-            }
-            return area(a, atA, m, atMiddle, atLeft, depth - 1) + area(m, atMiddle, b, atB, atRight, depth - 1);
-        }
-    }
-
-    /** Where the platform first rests under a heeling arm (m): there the righting arm less it passes 0 upwards. */
     OptionalDouble rest(ToDoubleFunction<Inclination> heeling) {
         ToDoubleFunction<Inclination> excess = at -> arm(at) - heeling.applyAsDouble(at);
-        double near = startRad() + stepRad * BESIDE;
-        if (!reaches(startRad() + stepRad)) {
-            return OptionalDouble.empty();
+        double start = startRad();
+        double near = start + (next(start) - start) * BESIDE;
+        boolean rises = near > start && excess.applyAsDouble(at(near)) >= 0;
+        if (rises && excess.applyAsDouble(at(start)) >= 0) {
+            return fromRest ? OptionalDouble.empty() : OptionalDouble.of(start);
         }
-        boolean rises = excess.applyAsDouble(at(near)) >= 0;
-        if (rises && excess.applyAsDouble(at(startRad())) >= 0) {
-            return OptionalDouble.of(startRad());
-        }
-        return crossing(excess, rises ? startRad() : near, FAR, true);
+        return crossing(excess, rises ? start : near, FAR, true);
     }
 
     /**
@@ -316,8 +253,8 @@ public final class RightingArms {
      */
     OptionalDouble secondIntercept(double restRad, double toRad, ToDoubleFunction<Inclination> heeling) {
         // From just beyond the first intercept: at it the difference is zero within rounding.
-        double beyond = restRad + stepRad * BESIDE;
-        return beyond < toRad && reaches(beyond)
+        double beyond = restRad + (next(restRad) - restRad) * BESIDE;
+        return beyond > restRad && beyond < toRad
                 ? crossing(at -> arm(at) - heeling.applyAsDouble(at), beyond, toRad, false)
                 : OptionalDouble.empty();
     }
@@ -328,12 +265,12 @@ public final class RightingArms {
      * @throws IllegalStateException when the platform cannot float
      */
     public static RightingCurve curve(LoadedPlatform loaded, RightingCurve.Request request) {
-        return new RightingArms(loaded, request).curve(request);
+        return fromUpright(loaded, request).curve(request);
     }
 
     /** The curve with its figures. */
     RightingCurve curve(RightingCurve.Request request) {
-        return settled(() -> figures(request));
+        return HeelStates.settled(() -> figures(request));
     }
 
     private RightingCurve figures(RightingCurve.Request request) {
@@ -359,7 +296,9 @@ public final class RightingArms {
                 complete()
                         ? null
                         : String.format(
-                                Locale.ROOT, "Beyond %.2f° the trim finds no stable rest.", Math.toDegrees(endRad())),
+                                Locale.ROOT,
+                                "Beyond %.2f° the trim finds no stable rest within 85° of upright.",
+                                Math.toDegrees(endRad())),
                 rights ? Double.valueOf(Math.toDegrees(from)) : null,
                 second.isPresent() ? Double.valueOf(Math.toDegrees(to)) : null,
                 rights ? Double.valueOf(Math.toDegrees(to - from)) : null,

@@ -34,6 +34,7 @@ final class Warnings {
         boolean upright = Inclination.upright(loaded).energy().leastCurvature() > 0;
         warnings.onStability(upright, evenKeel, afloat, estimate);
         warnings.onLimits(condition, limits, evenKeel);
+        warnings.onKg(limits, evenKeel);
         warnings.onTanks(loaded);
         warnings.onLoads(platform, condition);
         warnings.onOpenings(platform, afloat.waterplane());
@@ -82,6 +83,21 @@ final class Warnings {
                 add(
                         "Limit %s is not met: it is %.3f where the bound is %.3f, %.3f beyond it.",
                         limit.limit(), limit.value(), bound, -margin);
+            }
+        }
+    }
+
+    /** The curve of KG holds about every axis, and the limit counts the transverse correction, as the trade does. */
+    private void onKg(List<LimitResult> limits, EvenKeel evenKeel) {
+        double more = evenKeel.gm().longitudinal().freeSurfaceCorrection()
+                - evenKeel.gm().transverse().freeSurfaceCorrection();
+        for (LimitResult limit : limits) {
+            Double margin = limit.margin();
+            if (limit.limit().equals(Limits.ALLOWABLE_KG) && margin != null && margin >= 0 && margin < more) {
+                add(
+                        "Limit allowableKg is met with the transverse free-surface correction; with the longitudinal one, %.3f m greater, it"
+                                + " is not.",
+                        more);
             }
         }
     }

@@ -1,6 +1,5 @@
 package org.evendraft.stability;
 
-import java.util.List;
 import org.evendraft.stability.Equilibrium.Afloat;
 
 /**
@@ -25,10 +24,11 @@ public record WindAnswer(double azimuth, String resistanceCentre, WindForce aflo
         Inclination held = Inclination.upright(loaded).at(Slopes.of(at.waterplane()));
         HeelPath path = new HeelPath(Math.toRadians(request.azimuth()), request.freeTrim());
         WindForce afloat = new Wind(loaded.prepared().platform().windage()).on(held, path.leeward(held), speed);
-        RightingArms arms = new RightingArms(loaded, request);
-        WindCurve curve = RightingArms.settled(() -> arms.exists()
-                ? AxisAnswer.windCurve(new AxisStability(arms, loaded.prepared().platform()), speed)
-                : new WindCurve(speed, List.of(), null, null));
+        WindCurve curve = AxisAnswer.windCurve(
+                loaded,
+                RightingArms.fromUpright(loaded, request),
+                RightingArms.fromRest(loaded, request.forCriteria(), Slopes.of(at.waterplane())),
+                speed);
         return new WindAnswer(request.azimuth(), RESISTANCE_CENTRE, afloat, curve);
     }
 }

@@ -54,6 +54,7 @@ class DemoStabilityTest {
                 drafts,
                 OptionalDouble.empty(),
                 DEMO.platform().waterDensity(),
+                OptionalDouble.empty(),
                 DEMO.platform().damageCases());
         List<KgLimit> limits = AllowableKgCurve.find(DEMO, request, Progress.UNWATCHED);
         for (int i = 0; i < limits.size(); i++) {

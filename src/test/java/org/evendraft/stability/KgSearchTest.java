@@ -26,6 +26,7 @@ class KgSearchTest {
                 List.of(JudgedBarge.DRAFT),
                 OptionalDouble.empty(),
                 1.025,
+                OptionalDouble.empty(),
                 List.of(cases));
         return AllowableKgCurve.find(barge.prepared(), request, Progress.UNWATCHED)
                 .get(0);
@@ -99,7 +100,12 @@ class KgSearchTest {
         JudgedBarge barge =
                 new JudgedBarge().criterion(Situation.INTACT, Measure.INCLINATION, 60, 0, LimitAngle.LESSER);
         KgRequest request = new KgRequest(
-                JudgedBarge.mode(OptionalDouble.of(0)), List.of(4.0, 5.0), OptionalDouble.empty(), 1.025, List.of());
+                JudgedBarge.mode(OptionalDouble.of(0)),
+                List.of(4.0, 5.0),
+                OptionalDouble.empty(),
+                1.025,
+                OptionalDouble.empty(),
+                List.of());
         List<Double> seen = new ArrayList<>();
         AllowableKgCurve.find(barge.prepared(), request, (fraction, doing) -> seen.add(fraction));
         assertThat(seen).isSorted().hasSizeGreaterThan(10);

@@ -123,8 +123,8 @@ class RightingArmsTest {
     @Property(tries = 12, seed = "2026")
     void armIsTheDerivativeOfThePotentialEnergy(@ForAll @DoubleRange(min = 0, max = 359) double azimuth) {
         LoadedPlatform floater = slackTwinPontoon(400);
-        RightingArms arms =
-                new RightingArms(floater, new RightingCurve.Request(azimuth, 50, 1, true, LiquidTreatment.FREE));
+        RightingArms arms = RightingArms.fromUpright(
+                floater, new RightingCurve.Request(azimuth, 50, 1, true, LiquidTreatment.FREE));
         assertThat(arms.exists()).isTrue();
         double step = Math.toRadians(0.01);
         for (double degrees = 2; degrees < Math.toDegrees(arms.endRad()) - 1; degrees += 7) {

@@ -103,7 +103,7 @@ class WindTest {
     @CsvSource({"5", "15", "25"})
     void inclinationShrinksWallsAndExposesUndersides(double degrees) {
         JudgedBarge barge = new JudgedBarge().house(12, 16, 0, 100, 0).house(11, 11.2, 0, 0, 500);
-        RightingArms arms = new RightingArms(barge.loaded(), RightingCurve.Request.usual(0));
+        RightingArms arms = RightingArms.fromUpright(barge.loaded(), RightingCurve.Request.usual(0));
         Inclination at = arms.at(Math.toRadians(degrees));
         WindForce wind = new Wind(barge.windage).on(at, arms.leeward(at), 36);
         double phi = Math.toRadians(degrees);
