@@ -20,8 +20,8 @@ public final class WindHeel {
      */
     public static Optional<Waterplane> rest(LoadedPlatform loaded, Afloat calm, double azimuth, double speed) {
         RightingArms arms =
-                new RightingArms(loaded, RightingCurve.Request.usual(azimuth), Slopes.of(calm.waterplane()));
-        return RightingArms.settled(
+                RightingArms.fromRest(loaded, RightingCurve.Request.usual(azimuth), Slopes.of(calm.waterplane()));
+        return HeelStates.settled(
                 () -> rest(new AxisStability(arms, loaded.prepared().platform()), speed));
     }
 
