@@ -27,7 +27,7 @@ public final class BallastPlanner {
      */
     public static Plan plan(PreparedPlatform prepared, Condition condition, PlanRequest request) {
         ConditionResult before = Evaluation.evaluate(prepared, condition);
-        Plant plant = new Plant(prepared, condition);
+        Plant plant = new Plant(prepared, condition, request);
         ExactState start = ExactState.of(plant.loaded())
                 .orElseThrow(() -> FaultyDocumentException.impossible("", "The platform does not float as it is."));
         Found found = new TargetSearch(plant, request)
@@ -36,11 +36,12 @@ public final class BallastPlanner {
         List<Transfer> transfers = Transfer.of(plant, found.plan().flows());
         Schedule schedule = new Ordering(plant, request.operationLimits(), start).best(transfers);
         Path path = Path.follow(plant, schedule, request.operationLimits(), Path.CLOSE);
-        return new Report(plant, request, found, schedule, path).plan(before);
+        return new Report(plant, request, found, schedule, path, new Explanation(plant, start)).plan(before);
     }
 
     /** Puts an answer together. */
-    private record Report(Plant plant, PlanRequest request, Found found, Schedule schedule, Path path) {
+    private record Report(
+            Plant plant, PlanRequest request, Found found, Schedule schedule, Path path, Explanation explanation) {
 
         Plan plan(ConditionResult before) {
             ConditionResult after =
@@ -105,7 +106,8 @@ public final class BallastPlanner {
                         run.pump(),
                         run.start(),
                         run.end(),
-                        after(path.after(run))));
+                        after(path.after(run)),
+                        explanation.of(transfer)));
             }
             return moves;
         }

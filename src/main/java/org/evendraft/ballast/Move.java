@@ -14,6 +14,10 @@ import java.util.Map;
  * @param startMinute when it starts, from the plan's start (min)
  * @param endMinute when it ends (min)
  * @param after the state at its end
+ * @param explanation a sentence for people: the mass, from where to where, and what the move does by itself, that is how far the exact floating
+ *     position of the plan's start with this move alone differs from the one without: heel (degrees, to port or to starboard), trim (degrees, by
+ *     the bow or by the stern) and draft at the origin (m). With the figures of the plan's {@code before} a pencil finds nearly the same: heel
+ *     m·y/(Δ·GM), trim m·x/(Δ·GM), sinkage m/(ρ·A)
  */
 public record Move(
         int step,
@@ -24,7 +28,8 @@ public record Move(
         String pump,
         double startMinute,
         double endMinute,
-        After after) {
+        After after,
+        String explanation) {
 
     /**
      * The state at the end of a move, its own tanks at rest unless another move works on them.

@@ -198,11 +198,10 @@ final class Ordering {
 
     /** An order by each rule. */
     private List<Estimate> estimates(List<Transfer> order) {
-        List<Pump> pumps = plant.prepared().platform().pumps();
         List<Estimate> estimates = new ArrayList<>();
         for (Schedule.Rule rule : RULES) {
-            estimates.add(
-                    estimate(order, Schedule.of(order, pumps, plant.water().density(), rule)));
+            estimates.add(estimate(
+                    order, Schedule.of(order, plant.pumps(), plant.water().density(), rule)));
         }
         return estimates;
     }

@@ -1,5 +1,6 @@
 package org.evendraft.ballast;
 
+import java.util.List;
 import java.util.OptionalDouble;
 import org.evendraft.platform.GmBound;
 
@@ -9,8 +10,31 @@ import org.evendraft.platform.GmBound;
  * @param target where the platform shall float
  * @param objective what pumping and tanks cost
  * @param operationLimits what must hold at every instant on the way
+ * @param lockedTanks ids of tanks whose contents may not change, besides those that the platform locks
+ * @param pumpsOutOfService ids of pumps that may not be used
  */
-public record PlanRequest(Target target, Objective objective, OperationLimits operationLimits) {
+public record PlanRequest(
+        Target target,
+        Objective objective,
+        OperationLimits operationLimits,
+        List<String> lockedTanks,
+        List<String> pumpsOutOfService) {
+
+    /** Copies the lists. */
+    public PlanRequest {
+        lockedTanks = List.copyOf(lockedTanks);
+        pumpsOutOfService = List.copyOf(pumpsOutOfService);
+    }
+
+    /** The same with another target. */
+    public PlanRequest withTarget(Target other) {
+        return new PlanRequest(other, objective, operationLimits, lockedTanks, pumpsOutOfService);
+    }
+
+    /** The same with other limits on the way. */
+    public PlanRequest withOperationLimits(OperationLimits other) {
+        return new PlanRequest(target, objective, other, lockedTanks, pumpsOutOfService);
+    }
 
     /**
      * Where the platform shall float.

@@ -1,8 +1,13 @@
 package org.evendraft.ballast;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import java.util.HashSet;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import java.util.Set;
+import java.util.function.Function;
+import java.util.stream.Collectors;
 import org.evendraft.ballast.PlanRequest.Objective;
 import org.evendraft.ballast.PlanRequest.OperationLimits;
 import org.evendraft.ballast.PlanRequest.Target;
@@ -13,8 +18,11 @@ import org.evendraft.platform.FaultyDocumentException;
 import org.evendraft.platform.Fields;
 import org.evendraft.platform.GmBound;
 import org.evendraft.platform.Mode;
+import org.evendraft.platform.Platform;
 import org.evendraft.platform.PreparedPlatform;
+import org.evendraft.platform.Pump;
 import org.evendraft.platform.Range;
+import org.evendraft.platform.Tank;
 
 /** Reads plan requests, every fault listed. */
 public final class PlanRequestReader {
@@ -41,15 +49,42 @@ public final class PlanRequestReader {
     public static PlanRequest read(JsonNode document, PreparedPlatform prepared, Condition condition) {
         Faults faults = new Faults();
         Fields fields = Fields.of(document, "", faults);
+        Platform platform = prepared.platform();
         PlanRequest request = new PlanRequest(
                 target(fields.object("target"), prepared, condition.mode()),
                 fields.optionalObject("objective")
                         .map(PlanRequestReader::objective)
                         .orElse(new Objective(DEFAULT_PENALTY, DEFAULT_PENALTY)),
-                limits(fields.optionalObject("operationLimits"), condition.mode()));
+                limits(fields.optionalObject("operationLimits"), condition.mode()),
+                named(fields, "lockedTanks", ids(platform.tanks(), Tank::id)),
+                named(fields, "pumpsOutOfService", ids(platform.pumps(), Pump::id)));
         fields.noOthers();
         faults.throwIfAny();
         return request;
+    }
+
+    private static <T> Set<String> ids(List<T> list, Function<T, String> id) {
+        return list.stream().map(id).collect(Collectors.toSet());
+    }
+
+    /** The names of a list, each that of something the platform has, and each once. */
+    private static List<String> named(Fields fields, String property, Set<String> known) {
+        List<String> names = fields.texts(property);
+        Set<String> seen = new HashSet<>();
+        for (int i = 0; i < names.size(); i++) {
+            String name = names.get(i);
+            String at = fields.pointer(property) + "/" + i;
+            if (name.isBlank()) {
+                continue;
+            }
+            if (!known.contains(name)) {
+                fields.faults().meaning(at, "the platform has no '" + name + "' to name in " + property);
+            }
+            if (!seen.add(name)) {
+                fields.faults().meaning(at, "'" + name + "' is named twice");
+            }
+        }
+        return names;
     }
 
     private static Target target(Fields fields, PreparedPlatform prepared, Optional<Mode> mode) {

@@ -27,18 +27,25 @@ final class Plant {
     private final Condition condition;
     private final LoadedPlatform loaded;
     private final Stowage stowage;
+    private final List<Pump> pumps;
     private final List<BallastTank> tanks;
     private final List<PumpGroup> groups;
 
     /**
+     * @param prepared the platform
+     * @param condition the condition that the plan starts from
+     * @param request tells which tanks are locked and which pumps are out of service besides
      * @throws FaultyDocumentException when a ballast tank that a plan may move holds something other than the condition's sea water
      */
-    Plant(PreparedPlatform prepared, Condition condition) {
+    Plant(PreparedPlatform prepared, Condition condition, PlanRequest request) {
         this.prepared = prepared;
         this.condition = condition;
         this.loaded = LoadedPlatform.of(prepared, condition);
         this.stowage = Stowage.of(prepared, condition);
-        List<Tank> movable = movable();
+        this.pumps = prepared.platform().pumps().stream()
+                .filter(pump -> !request.pumpsOutOfService().contains(pump.id()))
+                .toList();
+        List<Tank> movable = movable(request.lockedTanks());
         checkDensities(movable);
         Map<String, Double> masses = new HashMap<>();
         condition.fills().forEach(fill -> masses.put(fill.tank(), fill.volume() * condition.waterDensity()));
@@ -51,17 +58,18 @@ final class Plant {
                 .toList();
         Set<String> ends = new HashSet<>(tanks.stream().map(BallastTank::id).toList());
         ends.add(Pump.SEA);
-        this.groups = PumpGroup.of(prepared.platform().pumps(), ends);
+        this.groups = PumpGroup.of(pumps, ends);
     }
 
-    private List<Tank> movable() {
+    private List<Tank> movable(List<String> lockedTanks) {
         Set<String> onPump = new HashSet<>();
-        for (Pump pump : prepared.platform().pumps()) {
+        for (Pump pump : pumps) {
             onPump.addAll(pump.from());
             onPump.addAll(pump.to());
         }
         return prepared.platform().tanks().stream()
-                .filter(tank -> tank.purpose() == Purpose.BALLAST && !tank.locked() && onPump.contains(tank.id()))
+                .filter(tank -> tank.purpose() == Purpose.BALLAST && onPump.contains(tank.id()))
+                .filter(tank -> !tank.locked() && !lockedTanks.contains(tank.id()))
                 .sorted(Comparator.comparing(Tank::id))
                 .toList();
     }
@@ -110,6 +118,11 @@ final class Plant {
     /** The tanks that a plan may move, by name. */
     List<BallastTank> tanks() {
         return tanks;
+    }
+
+    /** The pumps in service. */
+    List<Pump> pumps() {
+        return pumps;
     }
 
     List<PumpGroup> groups() {

@@ -31,7 +31,8 @@ record RestOfLoadPlan(int afterEvent, boolean sounded, ObjectNode request) {
     private static final String AFTER = "afterEvent";
     private static final String EVENTS = "events";
     private static final String FILLS = "fills";
-    private static final List<String> KEPT = List.of("objective", "operationLimits", "ballast");
+    private static final List<String> KEPT =
+            List.of("objective", "operationLimits", "lockedTanks", "pumpsOutOfService", "ballast");
 
     /**
      * Reads after which event a load plan goes on.

@@ -11,7 +11,8 @@ import org.evendraft.platform.PreparedPlatform;
 import org.junit.jupiter.api.Test;
 
 final class PlanRequestReaderTest {
-    private final PreparedPlatform prepared = BoxBarge.withPairs(1).platform();
+    private final PreparedPlatform prepared =
+            BoxBarge.withPairs(1).pumpOnEachSide(1, 500).platform();
     private final Condition condition = BoxBarge.withPairs(1).condition(prepared);
 
     private PlanRequest read(String json) {
@@ -33,6 +34,8 @@ final class PlanRequestReaderTest {
         assertThat(request.target().tolerance()).isEqualTo(new PlanRequest.Tolerance(0.01, 0.02));
         assertThat(request.objective()).isEqualTo(new PlanRequest.Objective(20, 20));
         assertThat(request.operationLimits().maxHeel()).isEmpty();
+        assertThat(request.lockedTanks()).isEmpty();
+        assertThat(request.pumpsOutOfService()).isEmpty();
     }
 
     @Test
@@ -63,6 +66,37 @@ final class PlanRequestReaderTest {
                         "/objective/touchPenalty",
                         "/objective/slackPenalty",
                         "/operationLimits/maxHeel");
+    }
+
+    @Test
+    void tanksAndPumpsLeftOutOfAPlanAreRead() {
+        PlanRequest request =
+                read("{\"target\":{\"draft\":6},\"lockedTanks\":[\"S1\",\"P1\"],\"pumpsOutOfService\":[\"pump-P\"]}");
+        assertThat(request.lockedTanks()).containsExactly("S1", "P1");
+        assertThat(request.pumpsOutOfService()).containsExactly("pump-P");
+    }
+
+    @Test
+    void tanksAndPumpsThatAreUnknownOrNamedTwiceAreAllFaults() {
+        assertThat(faultsOf(
+                        "{\"target\":{\"draft\":40},\"lockedTanks\":[\"X\",\"P1\",\"S1\",\"P1\",\"pump-P\",\"sea\",\"\",7],"
+                                + "\"pumpsOutOfService\":[\"pump-P\",\"pump-P\",\"P1\"]}"))
+                .containsExactlyInAnyOrder(
+                        "/target/draft",
+                        "/lockedTanks/0",
+                        "/lockedTanks/3",
+                        "/lockedTanks/4",
+                        "/lockedTanks/5",
+                        "/lockedTanks/6",
+                        "/lockedTanks/7",
+                        "/pumpsOutOfService/1",
+                        "/pumpsOutOfService/2");
+    }
+
+    @Test
+    void tanksAndPumpsLeftOutMustBeLists() {
+        assertThat(faultsOf("{\"target\":{\"draft\":6},\"lockedTanks\":\"P1\",\"pumpsOutOfService\":{}}"))
+                .containsExactlyInAnyOrder("/lockedTanks", "/pumpsOutOfService");
     }
 
     @Test

@@ -122,6 +122,19 @@ class LoadPlansTest {
     }
 
     @Test
+    void aPumpOutOfServiceStaysOutWhenTheRestIsPlannedAnew() {
+        String without = REQUEST.replaceFirst("\\{", "{ \"pumpsOutOfService\": [\"P1\"],");
+        for (String request : List.of(REQUEST, without)) {
+            String id = api.post(PATH, request).expect(201).json().path("id").textValue();
+            JsonNode rest = api.post(PATH + "/" + id + "/resume", "{ \"afterEvent\": 0 }")
+                    .expect(201)
+                    .json();
+            boolean pumped = rest.path("events").findValues("moves").stream().anyMatch(moves -> !moves.isEmpty());
+            assertThat(pumped).isEqualTo(request.equals(REQUEST));
+        }
+    }
+
+    @Test
     void resumedWithoutSoundingsTheRestComesOutAsItWasPlanned() {
         JsonNode first = api.post(PATH, REQUEST).expect(201).json();
         String address = PATH + "/" + first.path("id").textValue();

@@ -3,6 +3,7 @@ package org.evendraft.http;
 import static org.assertj.core.api.Assertions.assertThat;
 
 import com.fasterxml.jackson.databind.JsonNode;
+import java.util.List;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.Test;
 
@@ -27,6 +28,9 @@ class PlansTest {
         assertThat(condition).endsWith(plan.path("condition").textValue());
         assertThat(made.header("Location"))
                 .isEqualTo(condition + "/plans/" + plan.path("id").textValue());
+        assertThat(plan.path("moves").findValuesAsText("explanation"))
+                .isNotEmpty()
+                .allMatch(sentence -> sentence.contains("by itself"));
         assertThat(api.get(made.header("Location")).expect(200).json()).isEqualTo(plan);
         JsonNode list = api.get(condition + "/plans").expect(200).json().path("plans");
         assertThat(list.findValuesAsText("id")).containsExactly(plan.path("id").textValue());
@@ -45,6 +49,25 @@ class PlansTest {
                         .path("feasible")
                         .booleanValue())
                 .isFalse();
+    }
+
+    @Test
+    void aPlanWithTanksLockedOrPumpsOutOfServiceIsAnsweredHonestly() {
+        JsonNode free =
+                api.post(condition + "/plans", Barge.PLAN_REQUEST).expect(201).json();
+        assertThat(free.path("feasible").booleanValue()).isTrue();
+        for (String leftOut : List.of("\"lockedTanks\": [\"PORT\", \"STBD\"]", "\"pumpsOutOfService\": [\"P1\"]")) {
+            String request = Barge.PLAN_REQUEST.replaceFirst("\\{", "{ " + leftOut + ",");
+            JsonNode plan = api.post(condition + "/plans", request).expect(201).json();
+            assertThat(plan.path("feasible").booleanValue()).isFalse();
+            assertThat(plan.path("moves")).isEmpty();
+            assertThat(plan.path("binding")).isNotEmpty();
+        }
+        Api.Reply refused = api.post(
+                condition + "/plans",
+                Barge.PLAN_REQUEST.replaceFirst("\\{", "{ \"lockedTanks\": [\"X\"], \"pumpsOutOfService\": [\"Y\"],"));
+        refused.expect(422);
+        assertThat(refused.pointers()).containsExactlyInAnyOrder("/lockedTanks/0", "/pumpsOutOfService/0");
     }
 
     @Test

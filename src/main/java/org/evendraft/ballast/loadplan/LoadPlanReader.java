@@ -31,6 +31,10 @@ public final class LoadPlanReader {
 
     private static final String CONDITION = "/condition";
 
+    /** Properties that mean the same in a plan request, besides the target. */
+    private static final List<String> LIKE_A_PLAN =
+            List.of("objective", "operationLimits", "lockedTanks", "pumpsOutOfService");
+
     /** Greatest speed of a wind (m/s): over any on record. */
     private static final double STRONGEST_WIND = 150;
 
@@ -162,8 +166,9 @@ public final class LoadPlanReader {
             double middle = (prepared.hull().lowest() + prepared.hull().highest()) / 2;
             target.put("draft", draft.orElse(middle));
         }
-        fields.value("objective").ifPresent(node -> document.set("objective", node));
-        fields.value("operationLimits").ifPresent(node -> document.set("operationLimits", node));
+        for (String name : LIKE_A_PLAN) {
+            fields.value(name).ifPresent(node -> document.set(name, node));
+        }
         Condition at = start.orElseGet(this::nothingAboard);
         return gathered("", () -> PlanRequestReader.read(document, prepared, at));
     }

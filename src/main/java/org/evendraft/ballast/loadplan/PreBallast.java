@@ -79,10 +79,7 @@ record PreBallast(PreparedPlatform prepared, PlanRequest request, Function<Condi
 
     private PlanRequest leaning(double heelAngle, double trimAngle) {
         Target target = request.target();
-        return new PlanRequest(
-                new Target(target.draft(), heelAngle, trimAngle, target.minGm(), target.tolerance()),
-                request.objective(),
-                request.operationLimits());
+        return request.withTarget(new Target(target.draft(), heelAngle, trimAngle, target.minGm(), target.tolerance()));
     }
 
     /** A plan that misses its own target is taken only for the sake of the limits. */

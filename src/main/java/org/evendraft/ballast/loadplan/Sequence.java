@@ -104,7 +104,7 @@ final class Sequence {
     }
 
     private PlanRequest withLimits(OperationLimits limits) {
-        return new PlanRequest(request.ballast().target(), request.ballast().objective(), limits);
+        return request.ballast().withOperationLimits(limits);
     }
 
     private Trial tried(Condition from, SteadyWind next, int number, PlannedEvent planned) {

@@ -6,6 +6,8 @@ import static org.assertj.core.api.Assertions.within;
 
 import java.util.Arrays;
 import java.util.List;
+import java.util.stream.Stream;
+import org.evendraft.ballast.Plan;
 import org.evendraft.platform.Fault;
 import org.evendraft.platform.FaultyDocumentException;
 import org.evendraft.platform.PreparedPlatform;
@@ -42,6 +44,34 @@ final class LoadPlanReaderTest {
         assertThat(request.ballast().target().draft()).isEqualTo(mass / LiftBarge.AREA, within(1e-9));
         assertThat(request.ballast().operationLimits().maxHeel()).hasValue(5);
         assertThat(request.events().get(0).limits()).isEqualTo(request.ballast().operationLimits());
+    }
+
+    @Test
+    void tanksAndPumpsLeftOutAreReadAsInAPlanRequest() {
+        String leftOut = LiftBarge.LIGHT + ", \"lockedTanks\": [\"P1\"], \"pumpsOutOfService\": [\"pump\"]";
+        LoadPlanRequest request = LiftBarge.request(platform, leftOut, CRATE);
+        assertThat(request.ballast().lockedTanks()).containsExactly("P1");
+        assertThat(request.ballast().pumpsOutOfService()).containsExactly("pump");
+        assertThat(faultsOf(leftOut.replace("P1", "none").replace("[\"pump", "[\"P1"), CRATE))
+                .containsExactlyInAnyOrder("/lockedTanks/0", "/pumpsOutOfService/0");
+    }
+
+    @Test
+    void aTankLeftOutStaysOutOfEveryPlanOfTheSequence() {
+        String crate = CRATE.replace("\"y\": 0", "\"y\": 12");
+        for (String ballast : List.of("once", "eachEvent")) {
+            String rest = LiftBarge.HALF_FULL + ", \"lockedTanks\": [\"S1\", \"P1\"], \"ballast\": \"" + ballast + "\"";
+            LoadPlan plan = LiftBarge.plan(platform, rest, crate);
+            List<String> touched = Stream.concat(
+                            plan.preBallast().stream(),
+                            plan.events().stream()
+                                    .flatMap(event ->
+                                            Stream.concat(event.planBefore().stream(), event.planAfter().stream())))
+                    .flatMap(made -> made.fills().stream())
+                    .map(Plan.EndFill::tank)
+                    .toList();
+            assertThat(touched).isNotEmpty().isSubsetOf("P2", "S2");
+        }
     }
 
     @Test
