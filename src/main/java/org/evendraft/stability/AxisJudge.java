@@ -70,10 +70,6 @@ final class AxisJudge {
             return Finding.broken("the platform has no rest upright about this axis, from where areas count");
         }
         AxisStability.Place limit = axis.limit(criterion, wind);
-        if (!limit.isTheLimit()) {
-            return Finding.broken(
-                    "the curve comes to " + limit.what() + ", before an opening that counts meets the water");
-        }
         if (limit.angleRad() <= 0) {
             return Finding.broken("upright already, " + limit.what());
         }
@@ -95,7 +91,7 @@ final class AxisJudge {
         RightingArms arms = axis.arms();
         double from = isUnstableUpright(arms) ? 0 : own.getAsDouble();
         OptionalDouble second = axis.secondIntercept(wind);
-        AxisStability.Place end = axis.end(true);
+        AxisStability.Place end = axis.end();
         double to = second.orElse(end.angleRad());
         double least = arms.greatest(at -> -arms.arm(at), Math.min(to, from + FIRST_DEGREE), to);
         String what = second.isPresent() ? "the second intercept" : end.what();

@@ -43,9 +43,8 @@ final class AxisStability {
      *
      * @param angleRad the angle (rad)
      * @param what what it is, in words
-     * @param isTheLimit whether it is what the criterion asks for, not the end of what is known
      */
-    record Place(double angleRad, String what, boolean isTheLimit) {}
+    record Place(double angleRad, String what) {}
 
     RightingArms arms() {
         return arms;
@@ -126,7 +125,7 @@ final class AxisStability {
         return angle.stream()
                 .boxed()
                 .flatMap(a -> lowest(counted, arms.at(a)).stream()
-                        .map(low -> new Place(a, "opening " + low.opening() + " meets the water", true)))
+                        .map(low -> new Place(a, "opening " + low.opening() + " meets the water")))
                 .findFirst();
     }
 
@@ -147,9 +146,8 @@ final class AxisStability {
     record Lowest(double height, String opening) {}
 
     /**
-     * Where a criterion's areas and ranges end; at the end of the curve when what ends them is not on it. When the curve ends where the trim
-     * loses its rest, no opening has met the water and the arms have passed the second intercept, then {@link LimitAngle#DOWNFLOODING} has no
-     * place.
+     * Where a criterion's areas and ranges end; at the end of the curve when what ends them is not on it. By {@link LimitAngle#DOWNFLOODING}
+     * that lies beyond the second intercept, so that the arms lost after it count as far as they are known.
      */
     Place limit(Criterion criterion, double speed) {
         LimitAngle wanted = criterion.limitAngle();
@@ -163,18 +161,20 @@ final class AxisStability {
         OptionalDouble second =
                 flooding.isPresent() ? secondIntercept(speed, flooding.get().angleRad()) : secondIntercept(speed);
         if (toOpening) {
-            return end(arms.complete() || second.isEmpty());
+            return second.isPresent() && !arms.complete()
+                    ? new Place(arms.endRad(), end().what() + ", beyond the second intercept and before any opening")
+                    : end();
         }
         if (second.isPresent()) {
-            return new Place(second.getAsDouble(), "the second intercept", true);
+            return new Place(second.getAsDouble(), "the second intercept");
         }
-        return flooding.orElseGet(() -> end(true));
+        return flooding.orElseGet(this::end);
     }
 
     /** The end of the curve. */
-    Place end(boolean isTheLimit) {
+    Place end() {
         String what =
                 arms.complete() ? "the curve's last angle" : "the end of the curve, where the trim loses its rest";
-        return new Place(arms.endRad(), what, isTheLimit);
+        return new Place(arms.endRad(), what);
     }
 }

@@ -27,7 +27,7 @@ final class HeelPath {
     private static final double LEAP = 3e-3;
 
     /** The end of a path is found to this (rad). */
-    static final double SHORTEST_STEP = Math.toRadians(0.01);
+    static final double SHORTEST_STEP = Math.toRadians(0.0005);
 
     private final Slopes alongHeel;
     private final Slopes alongTrim;
@@ -72,6 +72,7 @@ final class HeelPath {
             if (found.isPresent() && isSmooth(here.state(), found.get())) {
                 last = here;
                 here = new Reached(next, found.get());
+                step *= 2;
             } else {
                 step = (next - here.angleRad()) / 2;
             }
@@ -103,6 +104,9 @@ final class HeelPath {
         double tau = freeTrim ? foreseen(near, other, phi) : 0;
         Inclination here = near.at(slopes(phi, tau));
         for (int i = 0; freeTrim && i < MOST_STEPS; i++) {
+            if (here.slopes().inclination() > GREATEST) {
+                return Optional.empty();
+            }
             double slope = here.energy().gradient().dot(alongTrim);
             double curvature = here.energy().curvatureAlong(alongTrim);
             if (Math.abs(slope) <= TRIM_TOLERANCE) {
@@ -111,9 +115,6 @@ final class HeelPath {
             double step = curvature > 0 ? -slope / curvature : -Math.signum(slope) * LONGEST_STEP;
             tau += Math.max(-LONGEST_STEP, Math.min(LONGEST_STEP, step));
             here = here.at(slopes(phi, tau));
-            if (here.slopes().inclination() > GREATEST) {
-                return Optional.empty();
-            }
         }
         return freeTrim ? Optional.empty() : Optional.of(here);
     }

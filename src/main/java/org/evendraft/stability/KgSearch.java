@@ -36,6 +36,8 @@ final class KgSearch {
     /** First step down from a KG that breaks a criterion (m), doubled until one holds. */
     private static final double FIRST_STEP = 0.25;
 
+    private static final int MOST_LOOKS = 5;
+
     /** How far from the governing axis others are looked at, in parts of the step between axes. */
     private static final double[] CLOSER = {-0.5, 0.5, -0.25, 0.25, -0.125, 0.125};
 
@@ -219,15 +221,19 @@ final class KgSearch {
         return lastPosition;
     }
 
+    /** Looks at axes about the governing one, and about the one that governs then, until none lowers the limit. */
     private void lookCloser() {
-        Governing found = governing;
-        Hull hull = found.hull();
-        Double azimuth = found.azimuth();
-        if (hull == null || azimuth == null) {
-            return;
-        }
-        for (double part : CLOSER) {
-            lowerBy(hull, azimuth + part * AllAround.AZIMUTH_STEP);
+        double before = Double.NaN;
+        for (int i = 0; i < MOST_LOOKS && limit != before; i++) {
+            before = limit;
+            Hull hull = governing.hull();
+            Double azimuth = governing.azimuth();
+            if (hull == null || azimuth == null) {
+                return;
+            }
+            for (double part : CLOSER) {
+                lowerBy(hull, azimuth + part * AllAround.AZIMUTH_STEP);
+            }
         }
     }
 

@@ -171,22 +171,44 @@ public final class RightingArms {
     OptionalDouble crossing(ToDoubleFunction<Inclination> what, double fromRad, double toRad, boolean upwards) {
         double sign = upwards ? 1 : -1;
         DoubleUnaryOperator signed = angle -> sign * what.applyAsDouble(at(angle));
+        double before = fromRad;
         double low = fromRad;
-        double atLow = signed.applyAsDouble(low);
-        while (low < toRad) {
-            double high = Math.min(toRad, next(low));
-            if (high <= low) {
-                break;
-            }
-            double atHigh = signed.applyAsDouble(high);
-            if (atLow < 0 && atHigh >= 0) {
+        double high = fromRad;
+        while (low < toRad && (high = Math.min(toRad, next(low))) > low) {
+            OptionalDouble hump = hump(signed, before, low, high);
+            double to = hump.orElse(high);
+            double from = hump.isPresent() ? before : low;
+            if (signed.applyAsDouble(from) < 0 && signed.applyAsDouble(to) >= 0) {
                 return OptionalDouble.of(
-                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, low, high));
+                        new BrentSolver(ANGLE_TOLERANCE).solve(MOST_EVALUATIONS, signed::applyAsDouble, from, to));
             }
+            before = low;
             low = high;
-            atLow = atHigh;
         }
         return OptionalDouble.empty();
+    }
+
+    /** Where something under 0 at three angles, greatest at the middle one, comes over 0 between them; empty when it does not. */
+    private static OptionalDouble hump(DoubleUnaryOperator what, double before, double low, double high) {
+        double middle = what.applyAsDouble(low);
+        boolean turns = before < low
+                && middle < 0
+                && what.applyAsDouble(before) <= middle
+                && what.applyAsDouble(high) < Math.min(0, middle);
+        if (!turns) {
+            return OptionalDouble.empty();
+        }
+        UnivariatePointValuePair top = top(what, before, high);
+        return top.getValue() >= 0 ? OptionalDouble.of(top.getPoint()) : OptionalDouble.empty();
+    }
+
+    private static UnivariatePointValuePair top(DoubleUnaryOperator what, double low, double high) {
+        return new BrentOptimizer(GREATEST_TOLERANCE, ANGLE_TOLERANCE)
+                .optimize(
+                        new MaxEval(MOST_EVALUATIONS),
+                        new UnivariateObjectiveFunction(what::applyAsDouble),
+                        GoalType.MAXIMIZE,
+                        new SearchInterval(low, high));
     }
 
     /** The angle at which something is greatest between two angles of the curve (rad), to be found near a node where it is. */
@@ -205,12 +227,7 @@ public final class RightingArms {
         if (!(high > low)) {
             return best;
         }
-        UnivariatePointValuePair found = new BrentOptimizer(GREATEST_TOLERANCE, ANGLE_TOLERANCE)
-                .optimize(
-                        new MaxEval(MOST_EVALUATIONS),
-                        new UnivariateObjectiveFunction(byAngle::applyAsDouble),
-                        GoalType.MAXIMIZE,
-                        new SearchInterval(low, high));
+        UnivariatePointValuePair found = top(byAngle, low, high);
         return found.getValue() > most ? found.getPoint() : best;
     }
 
