@@ -21,7 +21,7 @@ final class AxisStability {
     /** A heeling arm under this is none (m). */
     private static final double LEAST_HEELING = 1e-6;
 
-    /** Error allowed in areas under one degree of a curve, where criteria compare them (m·rad): a thousandth of a usual ratio's digit. */
+    /** Error allowed in areas under one degree of a curve, where criteria compare them (m·rad): ratios of usual areas, some 0.1 m·rad, are then good to three digits. */
     private static final double AREA_TOLERANCE = 1e-5;
 
     private final RightingArms arms;

@@ -162,7 +162,7 @@ final class KgSearch {
         }
         limit = low;
         breaksAt = high;
-        Broken what = broken(hull, azimuth, high).orElse(new Broken("afloat", "the platform floats upright"));
+        Broken what = broken(hull, azimuth, high).orElseThrow();
         governing = new Governing(what.criterion(), what.clause(), hull, azimuth);
     }
 

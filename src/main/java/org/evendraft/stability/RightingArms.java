@@ -106,7 +106,8 @@ public final class RightingArms {
 
     /** Where what happens on it begins (rad): upright, or a node before the platform's rest. */
     double startRad() {
-        if (startRad.isEmpty()) {
+        // The path may have turned out shorter since.
+        if (startRad.isEmpty() || startRad.getAsDouble() < states.startRad()) {
             startRad = OptionalDouble.of(fromRest ? beforeRest() : 0);
         }
         return startRad.getAsDouble();
